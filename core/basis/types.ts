@@ -1,0 +1,46 @@
+/** What a set of rules hands to the drive, and what comes back as a check. */
+import type { Working } from '../formula/working.ts'
+import type { Clause } from '../sources/clause.ts'
+import type { Quantity } from '../quantity/kinds.ts'
+import type { Effect, Extreme } from '../travel/types.ts'
+
+export type Status = 'holds' | 'fails' | 'not-applicable' | 'not-covered'
+
+/** What is asked, whatever the answer. */
+export interface Subject {
+  readonly id: string
+  readonly title: string
+  readonly clause: Clause
+}
+
+/** Demand against resistance at one place, in one combination of one set of cranes. */
+export interface Judgement {
+  readonly demand: Quantity
+  readonly resistance: Quantity
+  readonly utilisation: number
+  readonly working: Working
+}
+
+/** An effect to be made worst, and the judge who decides at that place. */
+export interface Ask extends Subject {
+  readonly span: number
+  /** Index of the train; undefined where no crane stands on the span. */
+  readonly train: number | undefined
+  readonly combination: string
+  readonly set: string
+  readonly effect: Effect
+  readonly judge: (worst: Extreme) => Judgement
+}
+
+/** An answer that needs no wheels: a proportion, or a subject that does not apply or is not covered, with the reason. */
+export interface Verdict extends Subject {
+  readonly status: Status
+  readonly why: string
+  readonly judgement?: Judgement
+}
+
+export interface Plan {
+  readonly asks: readonly Ask[]
+  readonly verdicts: readonly Verdict[]
+  readonly cautions: readonly string[]
+}

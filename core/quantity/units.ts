@@ -1,0 +1,108 @@
+/**
+ * Units as quotients of exact definitions: the international inch and pound (1959), standard gravity (3rd CGPM, 1901),
+ * the SI. A unit is named as the trade writes it; its factor gives SI.
+ */
+import { STANDARD_GRAVITY, type Kind, type UnitSystem } from './kinds.ts'
+
+const inch = 0.0254
+const foot = 12 * inch
+const pound = 0.45359237
+const poundForce = pound * STANDARD_GRAVITY
+const kip = 1000 * poundForce
+
+/** Unit name -> its dimension's kinds are given by KIND_UNITS; the factor turns one unit into SI. */
+export const UNIT = {
+  '': 1,
+  m: 1,
+  cm: 1 / 100,
+  mm: 1 / 1000,
+  in: inch,
+  ft: foot,
+  yd: 3 * foot,
+  m2: 1,
+  cm2: 1e-4,
+  mm2: 1e-6,
+  in2: inch ** 2,
+  m3: 1,
+  cm3: 1e-6,
+  mm3: 1e-9,
+  in3: inch ** 3,
+  m4: 1,
+  cm4: 1e-8,
+  mm4: 1e-12,
+  in4: inch ** 4,
+  m6: 1,
+  dm6: 1e-6,
+  cm6: 1e-12,
+  mm6: 1e-18,
+  in6: inch ** 6,
+  N: 1,
+  kN: 1000,
+  MN: 1e6,
+  lbf: poundForce,
+  kip,
+  'N m': 1,
+  'kN m': 1000,
+  'N mm': 1e-3,
+  'kip in': kip * inch,
+  'kip ft': kip * foot,
+  'lbf ft': poundForce * foot,
+  Pa: 1,
+  kPa: 1000,
+  MPa: 1e6,
+  GPa: 1e9,
+  'N/mm2': 1e6,
+  psi: poundForce / inch ** 2,
+  ksi: kip / inch ** 2,
+  'N/m': 1,
+  'kN/m': 1000,
+  'N/mm': 1000,
+  'lbf/ft': poundForce / foot,
+  'kip/ft': kip / foot,
+  'kip/in': kip / inch,
+  kg: 1,
+  t: 1000,
+  lb: pound,
+  ton: 2000 * pound,
+  'kg/m': 1,
+  'lb/ft': pound / foot,
+  'lb/yd': pound / (3 * foot),
+  'm/s': 1,
+  'm/min': 1 / 60,
+  'ft/min': foot / 60,
+  'ft/s': foot,
+  'N m2': 1,
+  'kN m2': 1000,
+  'N mm2': 1e-6,
+  'kip in2': kip * inch ** 2,
+} as const satisfies Record<string, number>
+
+export type Unit = keyof typeof UNIT
+
+/**
+ * How each kind is shown, and the unit in which products of a printed formula come out coherent
+ * (kip and inch, newton and millimetre), so that no stray 12 or 1000 appears between its factors.
+ */
+export const SHOWN = {
+  ratio: { us: '', si: '', coherent: { us: '', si: '' } },
+  length: { us: 'in', si: 'mm', coherent: { us: 'in', si: 'mm' } },
+  distance: { us: 'ft', si: 'm', coherent: { us: 'in', si: 'mm' } },
+  area: { us: 'in2', si: 'mm2', coherent: { us: 'in2', si: 'mm2' } },
+  modulus: { us: 'in3', si: 'mm3', coherent: { us: 'in3', si: 'mm3' } },
+  inertia: { us: 'in4', si: 'mm4', coherent: { us: 'in4', si: 'mm4' } },
+  warping: { us: 'in6', si: 'mm6', coherent: { us: 'in6', si: 'mm6' } },
+  force: { us: 'kip', si: 'kN', coherent: { us: 'kip', si: 'N' } },
+  moment: { us: 'kip ft', si: 'kN m', coherent: { us: 'kip in', si: 'N mm' } },
+  stress: { us: 'ksi', si: 'MPa', coherent: { us: 'ksi', si: 'MPa' } },
+  lineLoad: { us: 'kip/ft', si: 'kN/m', coherent: { us: 'kip/in', si: 'N/mm' } },
+  mass: { us: 'lb', si: 'kg', coherent: { us: 'lb', si: 'kg' } },
+  lineMass: { us: 'lb/ft', si: 'kg/m', coherent: { us: 'lb/ft', si: 'kg/m' } },
+  speed: { us: 'ft/min', si: 'm/min', coherent: { us: 'ft/s', si: 'm/s' } },
+  flexuralStiffness: { us: 'kip in2', si: 'kN m2', coherent: { us: 'kip in2', si: 'N mm2' } },
+} as const satisfies Record<Kind, { us: Unit; si: Unit; coherent: { us: Unit; si: Unit } }>
+
+/** The value of an SI figure in a named unit. */
+export const inUnit = (si: number, unit: Unit): number => si / UNIT[unit]
+
+/** The unit a kind is shown in. */
+export const shownUnit = (kind: Kind, system: UnitSystem): Unit => SHOWN[kind][system]

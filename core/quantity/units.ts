@@ -1,18 +1,19 @@
 /**
- * Units as quotients of exact definitions: the international inch and pound (1959), standard gravity (3rd CGPM, 1901),
- * the SI. A unit is named as the trade writes it; its factor gives SI.
+ * Units as quotients of exact definitions: the international yard (so foot and inch) and pound (1959), standard gravity
+ * (3rd CGPM, 1901), the SI. A unit is named as the trade writes it; its factor gives SI.
  */
 import { STANDARD_GRAVITY, type Kind, type UnitSystem } from './kinds.ts'
 
 const inch = 0.0254
-const foot = 12 * inch
+const foot = 0.3048
 const pound = 0.45359237
 const poundForce = pound * STANDARD_GRAVITY
 const kip = 1000 * poundForce
 
-/** Unit name -> its dimension's kinds are given by KIND_UNITS; the factor turns one unit into SI. */
+/** Unit name -> how much SI one of it is. Which kinds a unit belongs to stands in unit-names.ts. */
 export const UNIT = {
   '': 1,
+  '%': 1 / 100,
   m: 1,
   cm: 1 / 100,
   mm: 1 / 1000,
@@ -39,25 +40,32 @@ export const UNIT = {
   N: 1,
   kN: 1000,
   MN: 1e6,
+  kgf: STANDARD_GRAVITY,
+  tf: 1000 * STANDARD_GRAVITY,
   lbf: poundForce,
   kip,
   'N m': 1,
   'kN m': 1000,
+  'MN m': 1e6,
+  'kN cm': 10,
   'N mm': 1e-3,
   'kip in': kip * inch,
   'kip ft': kip * foot,
   'lbf ft': poundForce * foot,
+  'lbf in': poundForce * inch,
   Pa: 1,
   kPa: 1000,
   MPa: 1e6,
   GPa: 1e9,
   'N/mm2': 1e6,
+  'kN/cm2': 1e7,
   psi: poundForce / inch ** 2,
   ksi: kip / inch ** 2,
   'N/m': 1,
   'kN/m': 1000,
   'N/mm': 1000,
   'lbf/ft': poundForce / foot,
+  'lbf/in': poundForce / inch,
   'kip/ft': kip / foot,
   'kip/in': kip / inch,
   kg: 1,
@@ -75,9 +83,23 @@ export const UNIT = {
   'kN m2': 1000,
   'N mm2': 1e-6,
   'kip in2': kip * inch ** 2,
+  'kip ft2': kip * foot ** 2,
 } as const satisfies Record<string, number>
 
 export type Unit = keyof typeof UNIT
+
+/**
+ * What a unit of mass weighs, N, for entries that take force or mass. "lb" and "ton" are the pound-force and 2 kip there.
+ */
+export const WEIGHT_OF: Partial<Record<Unit, number>> = {
+  kg: STANDARD_GRAVITY,
+  t: 1000 * STANDARD_GRAVITY,
+  lb: poundForce,
+  ton: 2 * kip,
+  'kg/m': STANDARD_GRAVITY,
+  'lb/ft': poundForce / foot,
+  'lb/yd': poundForce / (3 * foot),
+}
 
 /**
  * How each kind is shown, and the unit in which products of a printed formula come out coherent
@@ -101,8 +123,23 @@ export const SHOWN = {
   flexuralStiffness: { us: 'kip in2', si: 'kN m2', coherent: { us: 'kip in2', si: 'N mm2' } },
 } as const satisfies Record<Kind, { us: Unit; si: Unit; coherent: { us: Unit; si: Unit } }>
 
+/** The SI figure of a value in a named unit. */
+export const fromUnit = (value: number, unit: Unit): number => {
+  const parts = wholeParts(UNIT[unit])
+  return parts === undefined ? value * UNIT[unit] : value / parts
+}
+
 /** The value of an SI figure in a named unit. */
-export const inUnit = (si: number, unit: Unit): number => si / UNIT[unit]
+export const inUnit = (si: number, unit: Unit): number => {
+  const parts = wholeParts(UNIT[unit])
+  return parts === undefined ? si / UNIT[unit] : si * parts
+}
+
+/** How many of the unit make one SI unit, if that is whole: dividing by 1000 is exact where multiplying by 0.001 is not. */
+function wholeParts(factor: number): number | undefined {
+  const parts = Math.round(1 / factor)
+  return factor < 1 && 1 / parts === factor ? parts : undefined
+}
 
 /** The unit a kind is shown in. */
 export const shownUnit = (kind: Kind, system: UnitSystem): Unit => SHOWN[kind][system]

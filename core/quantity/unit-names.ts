@@ -1,5 +1,5 @@
 /** Which units each kind takes, and how units are spelled. */
-import type { Kind } from './kinds.ts'
+import { DIMENSIONS, type Kind } from './kinds.ts'
 import { UNIT, type Unit } from './units.ts'
 
 const force = ['kip', 'lbf', 'kN', 'N', 'MN', 'kgf', 'tf'] as const
@@ -64,6 +64,9 @@ export function findUnit(text: string): Unit | undefined {
   return SAME_AS.get(direct)
 }
 
+/** The kind a unit measures; a mass is a mass here, whatever it may be read as. */
+export const kindOf = (unit: Unit): Kind => KIND_OF.get(unit) ?? 'ratio'
+
 function atomInOtherCase(word: string): string | undefined {
   const lower = word.toLowerCase()
   const plain = word === lower || word === word.toUpperCase() || (word.length > 2 && word.slice(1) === lower.slice(1))
@@ -107,6 +110,10 @@ const SPELLINGS: Record<string, string> = {
   metric: 'metric',
   short: 'short',
   percent: 'percent',
+  kNm: 'kNm',
+  Nm: 'Nm',
+  Nmm: 'Nmm',
+  kNcm: 'kNcm',
 }
 
 const ATOM = new Map(
@@ -141,6 +148,10 @@ const SAME_AS = new Map<string, Unit>([
   ['in lb', 'lbf in'],
   ['in lbf', 'lbf in'],
   ['m kN', 'kN m'],
+  ['kNm', 'kN m'],
+  ['Nm', 'N m'],
+  ['Nmm', 'N mm'],
+  ['kNcm', 'kN cm'],
   ['lb/in2', 'psi'],
   ['lbf/in2', 'psi'],
   ['kip/in2', 'ksi'],
@@ -150,3 +161,8 @@ const SAME_AS = new Map<string, Unit>([
   ['kN/mm2', 'GPa'],
   ['lb/in', 'lbf/in'],
 ])
+
+/** Later kinds win: a unit of mass is listed with forces too. */
+const KIND_OF = new Map(
+  (Object.keys(DIMENSIONS) as Kind[]).flatMap((kind) => UNITS_OF[kind].map((unit) => [unit, kind] as const)),
+)

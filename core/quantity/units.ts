@@ -125,20 +125,25 @@ export const SHOWN = {
 
 /** The SI figure of a value in a named unit. */
 export const fromUnit = (value: number, unit: Unit): number => {
-  const parts = wholeParts(UNIT[unit])
-  return parts === undefined ? value * UNIT[unit] : value / parts
+  const [over, under] = quotient(UNIT[unit])
+  return (value * over) / under
 }
 
 /** The value of an SI figure in a named unit. */
 export const inUnit = (si: number, unit: Unit): number => {
-  const parts = wholeParts(UNIT[unit])
-  return parts === undefined ? si / UNIT[unit] : si * parts
+  const [over, under] = quotient(UNIT[unit])
+  return (si * under) / over
 }
 
-/** How many of the unit make one SI unit, if that is whole: dividing by 1000 is exact where multiplying by 0.001 is not. */
-function wholeParts(factor: number): number | undefined {
+/**
+ * The factor as a quotient of whole numbers where it has one (1 mm = 1/1000 m, 1 ft = 3048/10000 m): 3 x 3048 / 10000 is the
+ * double nearest to 0.9144, 3 x 0.3048 is not.
+ */
+function quotient(factor: number): readonly [over: number, under: number] {
   const parts = Math.round(1 / factor)
-  return factor < 1 && 1 / parts === factor ? parts : undefined
+  if (factor < 1 && 1 / parts === factor) return [1, parts]
+  const tenThousandths = Math.round(factor * 10_000)
+  return factor < 1 && tenThousandths / 10_000 === factor ? [tenThousandths, 10_000] : [factor, 1]
 }
 
 /** The unit a kind is shown in. */

@@ -1,7 +1,7 @@
 /** Quantities as text: rounded for reading, in feet and inches, or exact for keeping. No locale: the same text everywhere. */
-import { DIMENSIONS, type Kind, type Quantity, type UnitSystem } from './kinds.ts'
+import type { Quantity, UnitSystem } from './kinds.ts'
 import { UNIT, fromUnit, inUnit, shownUnit, type Unit } from './units.ts'
-import { SI_UNIT, UNITS_OF } from './unit-names.ts'
+import { SI_UNIT, kindOf } from './unit-names.ts'
 
 /**
  * A number to `digits` significant digits (1 to 15). Digits left of the decimal point are never rounded away; trailing zeros
@@ -79,9 +79,6 @@ function exactNumber(si: number, unit: Unit): string | undefined {
   }
   return undefined
 }
-
-const kindOf = (unit: Unit): Kind =>
-  (Object.keys(DIMENSIONS) as Kind[]).find((kind) => UNITS_OF[kind].includes(unit)) ?? 'ratio'
 
 /** Drops trailing zeros where nothing was rounded off: where the short text is the number itself. */
 function tidy(text: string, exact: number): string {

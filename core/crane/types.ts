@@ -4,6 +4,8 @@ import type { Metre, Newton } from '../quantity/kinds.ts'
 export interface Wheel {
   /** Index of the crane in the job. */
   readonly crane: number
+  /** Its place in the crane's own list of wheels, from 0, however the crane stands. */
+  readonly wheel: number
   readonly offset: Metre
   readonly load: Newton
 }

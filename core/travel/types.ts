@@ -14,11 +14,12 @@ export interface Beam {
 
 /**
  * One addend of an effect: `factor` times a moment that the given wheels and dead load cause.
- * `at` names a fixed station, or 'worst' for the greatest sagging moment anywhere in the span at that position of the train.
+ * `at` names a fixed station along the runway, or 'worst' for the greatest sagging moment anywhere in the span at that position
+ * of the train, or 'same' for the station found for the first term: such a term has factor 0, it is reported, not searched.
  */
 export interface MomentTerm {
   readonly factor: number
-  readonly at: Metre | 'worst'
+  readonly at: Metre | 'worst' | 'same'
   /** Force of each wheel of the train, in the train's order: vertical or horizontal, with all its factors. */
   readonly wheels: readonly number[]
   /** Force per length over the whole span. */

@@ -1,0 +1,61 @@
+/** `longtravel check`: a job file in, a table of checks and the files asked for out. */
+import { join } from 'node:path'
+import { catalogue } from '../../core/catalogue/catalogue.ts'
+import { readJob } from '../../core/job/read.ts'
+import { resultOf, type Result } from '../../core/review/result.ts'
+import { review } from '../../core/review/review.ts'
+import type { Review } from '../../core/review/types.ts'
+import { checksCsv, envelopeCsv } from './csv.ts'
+import { EXIT, type Io } from './exit.ts'
+import { readFileText, readStreamText } from './input.ts'
+import { refusals, writeAll, type Target } from './output.ts'
+import { reviewTable } from './table.ts'
+import { printable } from './text.ts'
+
+export type Outcome =
+  | { readonly exit: 0 | 1 | 4; readonly review: Review; readonly result: Result }
+  | { readonly exit: 2; readonly messages: readonly string[] }
+
+/** A job's text reviewed; no file is touched. What is thrown is a fault of the program. */
+export const checkText = (text: string): Outcome => {
+  const read = readJob(text, catalogue)
+  if ('findings' in read) return { exit: EXIT.input, messages: read.findings.map(message) }
+  const reviewed = review(read.job)
+  return { exit: exitOf(reviewed), review: reviewed, result: resultOf(reviewed) }
+}
+
+export interface CheckOptions {
+  readonly job: string
+  readonly json: string | undefined
+  readonly csv: string | undefined
+}
+
+/** Runs the command; `-` is standard input or output. Gives the exit code. Nothing is written unless all can be. */
+export const check = async ({ job, json, csv }: CheckOptions, io: Io): Promise<number> => {
+  const refuse = (messages: readonly string[]): number => {
+    for (const text of messages) io.stderr(`${printable(text)}\n`)
+    return EXIT.input
+  }
+  const tables = csv === undefined ? [] : [join(csv, 'checks.csv'), join(csv, 'envelope.csv')]
+  const files = json === undefined || json === '-' ? [] : [json]
+  const refused = await refusals([...files, ...tables], job === '-' ? undefined : job, csv)
+  if (refused.length > 0) return refuse(refused)
+
+  const read = job === '-' ? await readStreamText(io.stdin()) : await readFileText(job)
+  if ('message' in read) return refuse([read.message])
+  const outcome = checkText(read.text)
+  if (outcome.exit === EXIT.input) return refuse(outcome.messages)
+
+  const text = `${JSON.stringify(outcome.result, null, 2)}\n`
+  const contents = [...files.map(() => text), checksCsv(outcome.result), envelopeCsv(outcome.review)]
+  const targets = [...files, ...tables].map((path, index): Target => ({ path, text: contents[index] ?? '' }))
+  const failed = await writeAll(targets, csv)
+  if (failed !== undefined) return refuse([failed])
+  io.stdout(json === '-' ? text : reviewTable(outcome.review))
+  return outcome.exit
+}
+
+const exitOf = ({ ok }: Review): 0 | 1 | 4 => (ok === null ? EXIT.open : ok ? EXIT.holds : EXIT.fails)
+
+/** One line an entry: path, what was read, what would be right. */
+const message = (finding: Finding): string => finding.path

@@ -1,14 +1,5 @@
 /** A job, read and completed with its defaults: SI, shapes looked up. Optional entries without a default stay optional. */
-import type {
-  KilogramPerMetre,
-  Metre,
-  MetrePerSecond,
-  Newton,
-  NewtonPerMetre,
-  Pascal,
-  Metre4,
-  UnitSystem,
-} from '../quantity/kinds.ts'
+import type { KilogramPerMetre, Metre, Newton, NewtonPerMetre, Pascal, Metre4, UnitSystem } from '../quantity/kinds.ts'
 import type { Channel, IShape } from '../catalogue/types.ts'
 
 export interface Job {
@@ -82,7 +73,6 @@ export interface Crane {
   readonly leastWheelLoad: readonly Newton[] | 'derive'
   readonly emptyWheelLoad: readonly Newton[] | 'derive'
   readonly bumperOverhang: readonly [first: Metre, last: Metre]
-  readonly travelSpeed?: MetrePerSecond
 }
 
 export interface Runway {

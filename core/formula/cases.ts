@@ -84,12 +84,12 @@ export function makeCases<W extends Where, K extends Kind>(
     kind: last.kind as K,
     where: where as W,
     branches,
-    choose: (values) => choose(values as Numbers),
+    choose: (values) => choose(values),
     value: (values: Values<W>): KindValue[K] => {
-      const { use } = branches[choose(values as Numbers)]!
-      return use.value(values as never) as KindValue[K]
+      const { use } = branches[choose(values)]!
+      return use.value(values) as KindValue[K]
     },
-    working: (values, system) => casesLines(cases as unknown as Cases, values as Numbers, cases.value(values), system),
+    working: (values, system) => casesLines(cases, values, cases.value(values), system),
   }
   return cases
 }

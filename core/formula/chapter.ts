@@ -43,7 +43,7 @@ export interface Chapter<C extends string = string> {
    * Equations of which the first one whose condition holds is used. Symbols that only conditions have are declared in
    * `where`. Throws at once for what `formula` throws for, for results of unlike kinds, and for a symbol of two kinds.
    */
-  cases<const B extends readonly BranchText[], const X extends Where = Record<never, never>>(
+  cases<const B extends readonly BranchText[], const X extends Where = never>(
     clause: `${C}${string}`,
     branches: B,
     where?: X,
@@ -108,13 +108,12 @@ function makeFormula<W extends Where, K extends Kind>(clause: Clause, spec: Form
     atMost,
     atLeast,
     value: (values: Values<W>): KindValue[K] => {
-      const result = bounded(values as Numbers)
-      if (!Number.isFinite(result)) throw notFinite(formula, values as Numbers)
+      const result = bounded(values)
+      if (!Number.isFinite(result)) throw notFinite(formula, values)
       return as(kind, result)
     },
-    part: (part, values) => compute[part]?.(values as Numbers) ?? NaN,
-    working: (values, system) =>
-      formulaLine(formula as unknown as Formula, values as Numbers, formula.value(values), system),
+    part: (part, values) => compute[part]?.(values) ?? NaN,
+    working: (values, system) => formulaLine(formula, values, formula.value(values), system),
   }
   return formula
 }

@@ -68,7 +68,7 @@ export function symbolsOf(tree: Expression | Condition): readonly string[] {
 
 function parseText(text: string): Node {
   try {
-    return parse(text) as Node
+    return parse(text)
   } catch (error) {
     throw new Error(`"${text}" cannot be read: ${error instanceof Error ? error.message : String(error)}`, {
       cause: error,

@@ -2,16 +2,7 @@
 import type { Kind, KindValue, Quantity } from '../quantity/kinds.ts'
 import { citation, type Clause } from '../sources/clause.ts'
 import { TESTS } from './compile.ts'
-import {
-  FormulaError,
-  type Comparison,
-  type Figure,
-  type Numbers,
-  type Rule,
-  type Step,
-  type Values,
-  type Where,
-} from './types.ts'
+import { FormulaError, type Comparison, type Figure, type Rule, type Step, type Values, type Where } from './types.ts'
 
 /** A derivation, step by step. Written out by writeWorking (write.ts). */
 export interface Working {
@@ -49,7 +40,7 @@ export function working(): WorkingRecorder {
     steps,
     take: (rule, values) => {
       const result = rule.value(values)
-      steps.push({ step: 'rule', rule: rule as unknown as Rule, values: values as Numbers, result })
+      steps.push({ step: 'rule', rule: rule as unknown as Rule, values: values, result })
       return result
     },
     given: (symbol, kind, value, note = '', clause) => {

@@ -34,11 +34,11 @@ export const run = async (args: readonly string[], io: Io): Promise<number> => {
 
 /** Runs the command line that this process was started with. */
 export const start = async (): Promise<void> => {
-  let unwritten = false
+  const lost = { output: false }
   const refuse = (name: string) => (error: NodeJS.ErrnoException) => {
     // A reader that has seen enough (`| head`) is no fault.
     if (error.code === 'EPIPE') return
-    unwritten = true
+    lost.output = true
     process.exitCode = EXIT.input
     if (name === 'output') process.stderr.write(`standard output: cannot be written: ${reasonOf(error)}\n`)
   }
@@ -52,7 +52,7 @@ export const start = async (): Promise<void> => {
   }
   process.on('uncaughtException', (error) => process.exit(tellFault(error, io)))
   const exit = await run(process.argv.slice(2), io)
-  process.exitCode = unwritten ? EXIT.input : exit
+  process.exitCode = lost.output ? EXIT.input : exit
 }
 
 const tellFault = (error: unknown, { stderr, environment }: Io): number => {

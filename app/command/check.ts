@@ -1,7 +1,7 @@
 /** `longtravel check`: a job file in, a table of checks and the files asked for out. */
 import { join } from 'node:path'
-import { catalogue } from '../../core/catalogue/catalogue.ts'
-import { readJob } from '../../core/job/read.ts'
+import { catalogue } from '../../core/catalogue/load.ts'
+import { readJob, type Finding } from '../../core/job/read.ts'
 import { resultOf, type Result } from '../../core/review/result.ts'
 import { review } from '../../core/review/review.ts'
 import type { Review } from '../../core/review/types.ts'
@@ -16,11 +16,12 @@ export type Outcome =
   | { readonly exit: 0 | 1 | 4; readonly review: Review; readonly result: Result }
   | { readonly exit: 2; readonly messages: readonly string[] }
 
-/** A job's text reviewed; no file is touched. What is thrown is a fault of the program. */
-export const checkText = (text: string): Outcome => {
+/** A job's text reviewed; no file is touched. `name` is what messages call the text. What is thrown is a fault of the program. */
+export const checkText = (text: string, name = 'job'): Outcome => {
   const read = readJob(text, catalogue)
-  if ('findings' in read) return { exit: EXIT.input, messages: read.findings.map(message) }
-  const reviewed = review(read.job)
+  if (!read.ok) return { exit: EXIT.input, messages: read.findings.map((finding) => messageOf(finding, name)) }
+  const judged = review(read.job)
+  const reviewed = { ...judged, cautions: [...read.cautions, ...judged.cautions] }
   return { exit: exitOf(reviewed), review: reviewed, result: resultOf(reviewed) }
 }
 
@@ -43,7 +44,7 @@ export const check = async ({ job, json, csv }: CheckOptions, io: Io): Promise<n
 
   const read = job === '-' ? await readStreamText(io.stdin()) : await readFileText(job)
   if ('message' in read) return refuse([read.message])
-  const outcome = checkText(read.text)
+  const outcome = checkText(read.text, job === '-' ? 'standard input' : job)
   if (outcome.exit === EXIT.input) return refuse(outcome.messages)
 
   const text = `${JSON.stringify(outcome.result, null, 2)}\n`
@@ -57,5 +58,6 @@ export const check = async ({ job, json, csv }: CheckOptions, io: Io): Promise<n
 
 const exitOf = ({ ok }: Review): 0 | 1 | 4 => (ok === null ? EXIT.open : ok ? EXIT.holds : EXIT.fails)
 
-/** One line an entry: path, what was read, what would be right. */
-const message = (finding: Finding): string => finding.path
+/** One line an entry: its path, what was read, what would be right. The file as a whole goes by its name. */
+const messageOf = ({ path, read, message }: Finding, name: string): string =>
+  `${path || name}: ${read === '' ? '' : `read ${read}; `}${message}`.replace(/\s+/g, ' ')

@@ -83,15 +83,15 @@ const spoil: fc.Arbitrary<Spoil> = fc.oneof(
   { weight: 6, arbitrary: fc.double({ min: -9, max: 9, noNaN: true }).map((power) => scale(10 ** power)) },
   { weight: 6, arbitrary: fc.double({ min: 0.3, max: 3, noNaN: true }).map(scale) },
   { weight: 3, arbitrary: fc.constantFrom(...words).map(put) },
-  { weight: 2, arbitrary: fc.double().map((value) => put(value)) },
+  { weight: 2, arbitrary: fc.double().map(put) },
   { weight: 2, arbitrary: fc.string().map(put) },
   { weight: 1, arbitrary: fc.jsonValue({ maxDepth: 3 }).map((value) => put(value as Json)) },
   { weight: 3, arbitrary: fc.constantFrom(drop, twice) },
   { weight: 3, arbitrary: fc.nat().map(exchange) },
   {
     weight: 1,
-    arbitrary: fc.constantFrom('__proto__', 'toString', 'x', '').map((key) => ({ holder }) => {
-      put(1)({ holder, key })
+    arbitrary: fc.constantFrom('__proto__', 'toString', 'x', '').map((key): Spoil => ({ holder }, job) => {
+      put(1)({ holder, key }, job)
     }),
   },
 )

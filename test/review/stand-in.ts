@@ -111,8 +111,8 @@ export const standIn: Review = {
       cranes: [0],
       turned: [false],
       wheels: [
-        { crane: 0, offset: m(0), load: N(50_000) },
-        { crane: 0, offset: m(2), load: N(40_000) },
+        { crane: 0, wheel: 0, offset: m(0), load: N(50_000) },
+        { crane: 0, wheel: 1, offset: m(2), load: N(40_000) },
       ],
       mayMirror: true,
     },

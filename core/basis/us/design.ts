@@ -1,0 +1,180 @@
+/** What every US check reads: the girder, its loads, and the loadings (cranes together x combination) to be tried. */
+import type { CraneWheels } from '../../crane/wheels.ts'
+import type { WheelTrain } from '../../crane/types.ts'
+import { working, type Working } from '../../formula/working.ts'
+import type { Job } from '../../job/types.ts'
+import { as, STANDARD_GRAVITY, type Metre, type Newton, type NewtonPerMetre } from '../../quantity/kinds.ts'
+import type { Section } from '../../section/types.ts'
+import { combinationsOf, setsOfCranes, type Combination, type Share, type Together } from './combinations.ts'
+import { flangeForces, leverArm, type FlangeForces } from './flange.ts'
+import type { Steel } from './flexure.ts'
+import { craneForces, type CraneForces } from './forces.ts'
+
+export interface Design {
+  readonly job: Job
+  readonly section: Section
+  /** The lowest yield strength of the parts: one strength for the whole girder. */
+  readonly steel: Steel
+  readonly wheels: readonly CraneWheels[]
+  readonly trains: readonly WheelTrain[]
+  readonly forces: readonly CraneForces[]
+  readonly dead: NewtonPerMetre
+  readonly live: NewtonPerMetre
+  readonly deadWorking: Working
+  /** Rail head above the centroid of the top flange with its cap; beside the web; above the girder's centroid. */
+  readonly railArm: Metre
+  readonly eccentricity: Metre
+  readonly headAboveCentroid: Metre
+  readonly loadings: readonly Loading[]
+  readonly cautions: readonly string[]
+}
+
+/** One combination of one set of cranes with one train on the span; forces factored. */
+export interface Loading {
+  readonly set: string
+  readonly combination: Combination
+  /** Undefined: dead load alone. */
+  readonly train: number | undefined
+  /** By wheel of the train, N: vertical with impact, horizontal on the top and on the bottom flange. */
+  readonly vertical: readonly number[]
+  readonly top: readonly number[]
+  readonly bottom: readonly number[]
+  /** Axial force in the girder, N. */
+  readonly longitudinal: Newton
+  readonly uniform: NewtonPerMetre
+  /** How the forces of the heaviest wheel came about. */
+  readonly working: Working
+}
+
+export const designOf = (
+  job: Job,
+  section: Section,
+  wheels: readonly CraneWheels[],
+  trains: readonly WheelTrain[],
+): Design => {
+  const { girder, runway, basis } = job
+  const forces = job.cranes.map((crane, index) => craneForces(basis, crane, wheels[index]!.greatest))
+  const on = working()
+  const ownWeight = on.given('g_girder', 'lineLoad', as('lineLoad', section.massPerLength * STANDARD_GRAVITY), 'girder')
+  const rail = on.given('g_rail', 'lineLoad', as('lineLoad', runway.rail.massPerLength * STANDARD_GRAVITY), 'rail')
+  const added = on.given('g_added', 'lineLoad', girder.addedDeadLoad, 'added dead load')
+  const dead = on.given('g', 'lineLoad', as('lineLoad', ownWeight + rail + added), 'dead load')
+  const eccentricity = runway.rail.eccentricity ?? as('length', 0.75 * section.tw)
+  const steels = [girder.steel, girder.capSteel, girder.plateSteel].filter((steel) => steel !== undefined)
+  const weakest = steels.reduce((a, b) => (b.fy < a.fy ? b : a))
+  const base = {
+    job,
+    section,
+    steel: { F_y: weakest.fy, E: girder.steel.E },
+    wheels,
+    trains,
+    forces,
+    dead,
+    live: girder.addedLiveLoad,
+    deadWorking: on,
+    railArm: leverArm(section, runway.rail.height),
+    eccentricity,
+    headAboveCentroid: as('length', section.depth - section.yBar + runway.rail.height),
+  }
+  return { ...base, loadings: loadingsOf(base), cautions: cautionsOf(base) }
+}
+
+type Base = Omit<Design, 'loadings' | 'cautions'>
+
+function loadingsOf(base: Base): readonly Loading[] {
+  const { job, trains } = base
+  const sets = setsOfCranes(job.basis, job.cranes)
+  const loadings: Loading[] = []
+  for (const combination of combinationsOf(job.basis.method)) {
+    const uniform = as('lineLoad', combination.dead * base.dead + combination.live * base.live)
+    if (combination.live === 0) {
+      const none = { vertical: [], top: [], bottom: [], longitudinal: as('force', 0), working: base.deadWorking }
+      loadings.push({ set: 'no crane', combination, train: undefined, uniform, ...none })
+      continue
+    }
+    trains.forEach((train, index) => {
+      for (const set of withoutWeaker(sets, train.cranes)) {
+        loadings.push({ set: set.name, combination, train: index, uniform, ...factored(base, train, set, combination) })
+      }
+    })
+  }
+  return loadings
+}
+
+/** Sets that hold all cranes of the train, less those in which no crane brings more than in another. */
+function withoutWeaker(sets: readonly Together[], cranes: readonly number[]): readonly Together[] {
+  const holding = sets.filter((set) => cranes.every((crane) => set.shares.has(crane)) && neighbours(set, cranes))
+  return holding.filter(
+    (set, index) =>
+      !holding.some(
+        (other, at) => at !== index && brings(other, set, cranes) && !(brings(set, other, cranes) && index < at),
+      ),
+  )
+}
+
+/** Cranes of a set that stands between others of the same set cannot be left out. */
+function neighbours(set: Together, cranes: readonly number[]): boolean {
+  const order = [...set.shares.keys()]
+  return order.indexOf(cranes.at(-1)!) - order.indexOf(cranes[0]!) === cranes.length - 1
+}
+
+const PARTS = ['vertical', 'impact', 'sideThrust', 'longitudinal'] as const satisfies readonly (keyof Share)[]
+
+/** Whether every crane brings at least as much in `strong` as in `weak`. */
+const brings = (strong: Together, weak: Together, cranes: readonly number[]): boolean =>
+  cranes.every((crane) => PARTS.every((part) => strong.shares.get(crane)![part] >= weak.shares.get(crane)![part]))
+
+function factored(base: Base, train: WheelTrain, set: Together, { dead, live }: Combination) {
+  const { job, section, wheels, forces } = base
+  const split = job.basis.craneDeadFactor === 'split' && job.basis.method === 'LRFD'
+  const vertical: number[] = []
+  const flanges: FlangeForces[] = []
+  let heaviest: Working = { steps: [] }
+  let longitudinal = 0
+  for (const crane of train.cranes)
+    longitudinal += live * set.shares.get(crane)!.longitudinal * forces[crane]!.longitudinal
+
+  for (const wheel of train.wheels) {
+    const share = set.shares.get(wheel.crane)!
+    const on = working()
+    const static_ = wheel.load
+    const relieved = (split && wheels[wheel.crane]!.dead?.[wheel.wheel]) || 0
+    const { impact } = forces[wheel.crane]!
+    const P = as(
+      'force',
+      share.vertical * (live * (static_ - relieved) + dead * relieved) + live * share.impact * impact * static_,
+    )
+    const H = as('force', live * share.sideThrust * forces[wheel.crane]!.sideThrust[wheel.wheel]!)
+    on.given('P', 'force', P, `wheel of ${job.cranes[wheel.crane]!.name} with impact and load factor`)
+    on.given('H', 'force', H, 'its side thrust with load factor')
+    flanges.push(flangeForces(section, { H, P, a: base.railArm, e: base.eccentricity }, on))
+    if (P > Math.max(0, ...vertical)) heaviest = on
+    vertical.push(P)
+  }
+  return {
+    vertical,
+    top: flanges.map((flange) => flange.top),
+    bottom: flanges.map((flange) => flange.bottom),
+    longitudinal: as('force', longitudinal),
+    working: heaviest,
+  }
+}
+
+function cautionsOf(base: Base): readonly string[] {
+  const { job, section, forces, wheels } = base
+  const cautions = forces.flatMap((force) => force.cautions)
+  if (job.basis.craneDeadFactor === 'split' && wheels.some((crane) => crane.dead === undefined)) {
+    cautions.push(
+      'The crane’s own weight cannot be told from the wheel loads given, so that the live-load factor stands on the whole wheel load.',
+    )
+  }
+  if (section.cap.thickness > 0) {
+    const limit = 1.12 * Math.sqrt(base.steel.E / base.steel.F_y)
+    if (section.cap.slenderness > limit) {
+      cautions.push(
+        `The cap between its welds has a width over thickness of ${section.cap.slenderness.toFixed(1)}, above ${limit.toFixed(1)} of AISC 360-22 Table B4.1b case 18; F4 has no formula for its buckling: judge it.`,
+      )
+    }
+  }
+  return cautions
+}

@@ -16,7 +16,7 @@ import type { FlangeSystem, Section } from './types.ts'
  * - Shear centre and C_w of what is not a rolled shape alone come from sectorial coordinates on the middle lines: exact for the
  *   thin-walled tree in which flange and cap each bend in their own plane about the girder's plane of symmetry.
  * - h, h_c, h_p as in AISC 360-22, B4.1b: rolled webs less k, also under a cap; welded webs between the flanges' inside faces, the
- *   weld's leg left out. h_p = 0 where the plastic axis lies at or above the web's toe (commentary F4).
+ *   weld's leg left out. h_p = 0 where the plastic axis lies at or above the web's toe (commentary F4); so is h_c with the centroid.
  * - r_t is F4-11 (F4.2(c)(7)(i)); with a cap it is that of flange, cap and a third of the web between centroid and flange (ii).
  *
  * Valid for an entry without a refusal of `sectionFindings`; it raises nothing.
@@ -24,7 +24,8 @@ import type { FlangeSystem, Section } from './types.ts'
 export function sectionOf(entry: SectionEntry): Section {
   const girder = entry.kind === 'rolled' ? rolledGirder(entry.shape) : platedGirder(entry)
   const { d, tw, topFlange, bottomFlange } = girder
-  const capTop = d + (entry.cap === undefined ? 0 : thicknessOf(entry.cap))
+  const capThickness = entry.cap === undefined ? 0 : thicknessOf(entry.cap)
+  const depth = d + capThickness
   const cap = entry.cap === undefined ? undefined : capPart(entry.cap, d)
   const whole = cap === undefined ? girder.part : join([girder.part, cap])
   // A rolled shape alone keeps the handbook's rounding in its moduli too.
@@ -36,22 +37,22 @@ export function sectionOf(entry: SectionEntry): Section {
   const warping = sectorialOf(whole.walls)
   const { A, y: yBar, Ix, Iy } = whole
   const Cw = printed.Cw ?? warping.Cw
-  const SxTop = printed.Sx ?? Ix / (capTop - yBar)
+  const SxTop = printed.Sx ?? Ix / (depth - yBar)
   const capWidth = entry.cap === undefined ? 0 : widthOf(entry.cap)
   const topPart = cap === undefined ? girder.topPart : join([girder.topPart, cap])
   const top = flangeSystem(topPart, Math.max(topFlange.width, capWidth))
   const bottom = flangeSystem(girder.bottomPart, bottomFlange.width)
   const toe = d - topFlange.k
-  const hc = 2 * (toe - yBar)
+  const hc = Math.max(0, 2 * (toe - yBar))
   const aw = (hc * tw) / top.A
-  const webInCompression = (d - topFlange.thickness - yBar) * tw
+  const webInCompression = Math.max(0, d - topFlange.thickness - yBar) * tw
 
   return {
     makeUp: entry.kind === 'plated' ? 'plated' : entry.cap === undefined ? 'rolled' : 'capped',
     name: nameOf(entry),
     doublySymmetric,
     A: as('area', A),
-    depth: as('length', capTop),
+    depth: as('length', depth),
     yBar: as('length', yBar),
     Ix: as('inertia', Ix),
     Iy: as('inertia', Iy),
@@ -73,8 +74,8 @@ export function sectionOf(entry: SectionEntry): Section {
     topFlange,
     bottomFlange,
     cap: {
-      thickness: as('length', capTop - d),
-      slenderness: entry.cap === undefined ? 0 : betweenWelds(entry.cap, topFlange.width) / thicknessOf(entry.cap),
+      thickness: as('length', capThickness),
+      slenderness: entry.cap === undefined ? 0 : betweenWelds(entry.cap, topFlange.width) / capThickness,
     },
     ho: printed.ho ?? as('length', top.height - bottom.height),
     rts: printed.rts ?? as('length', Math.sqrt(Math.sqrt(Iy * Cw) / SxTop)),

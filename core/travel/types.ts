@@ -40,6 +40,13 @@ export type Effect =
       readonly wheels: readonly number[]
       readonly uniform: NewtonPerMetre
     }
+  /** Reaction of a support: of simple girders the sum of the two that rest on it. */
+  | {
+      readonly kind: 'bracketReaction'
+      readonly support: number
+      readonly wheels: readonly number[]
+      readonly uniform: NewtonPerMetre
+    }
   /** Greatest downward deflection anywhere in the span. */
   | { readonly kind: 'deflection'; readonly wheels: readonly number[]; readonly stiffness: NewtonSquareMetre }
   /** One wheel stood at a station: an effect that no position of the train changes (web under a wheel). */
@@ -62,9 +69,14 @@ export interface Extreme {
   readonly span: number
   readonly station: Metre
   readonly side: Side
+  /**
+   * Station of the train's first wheel; wheel i stands at lead + offset_i, or lead - offset_i where mirrored. Where cranes
+   * of a train are worse apart than bumper to bumper, the others stand as `positions` tells.
+   */
   readonly lead: Metre
   readonly mirrored: boolean
   readonly train: number | undefined
+  /** By crane: wheel i of its own list stands at lead + offset_i, or lead - offset_i where mirrored. */
   readonly positions: readonly { readonly crane: number; readonly lead: Metre; readonly mirrored: boolean }[]
   /** Wheels (indices in the train) that stand on the span. */
   readonly on: readonly number[]

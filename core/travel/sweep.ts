@@ -1,0 +1,189 @@
+/**
+ * The worst position of moving wheels for a sum of moments in one simple girder: each term at its own station, fixed or
+ * wherever it is greatest at that position. Exact.
+ *
+ * Why this is exact. Let s be the lead. Between two places where a wheel meets a support or a fixed station, the same wheels
+ * stand on the girder and the moment at a fixed station is linear in s. A greatest moment keeps its crest (crest.ts)
+ * between two places where the shear beside a wheel or at a support is zero, and these are linear equations in s; with one
+ * crest per term the sum is one quadratic in s there, greatest at an end or at its vertex. Where forces push up, a term
+ * has several crests: the sum of maxima is then the greatest of the sums over every choice of crests, and a place where two
+ * choices are equal bends the wrong way to be a maximum, so the vertices of all choices are enough.
+ * Every candidate is evaluated as it is, so none can be reported greater than it is.
+ */
+import { crestChanges, makeCrests, readCrests, type Crests, type Row, type TermLoads } from './crest.ts'
+import { EQUAL } from './passage.ts'
+
+/** A term with its place: a fixed station from the left support, or undefined for the greatest anywhere. */
+export interface SweepTerm extends TermLoads {
+  readonly at: number | undefined
+}
+
+export interface Swept {
+  readonly value: number
+  readonly lead: number
+}
+
+/** The greatest sum for a lead within [low, high]; of equal ones the smallest lead. */
+export const sweep = (row: Row, terms: readonly SweepTerm[], low = -Infinity, high = Infinity): Swept => {
+  const events = eventsOf(row, terms, low, high)
+  const work = new Float64Array(terms.length * (2 * row.offsets.length + 2) + 2)
+  const crests = terms.map(() => makeCrests(row.offsets.length))
+  let lead = events[0]!
+  let value = valueAt(row, terms, lead, crests)
+  const read = (s: number): void => {
+    const sum = valueAt(row, terms, s, crests)
+    if (!(sum > value + EQUAL * Math.abs(value))) return
+    value = sum
+    lead = s
+  }
+
+  for (let e = 0; e + 1 < events.length; e++) {
+    const from = events[e]!
+    const to = events[e + 1]!
+    if (!(to > from)) continue
+    work[0] = from
+    let count = 1
+    for (const term of terms) if (term.at === undefined) count = crestChanges(row, term, from, to, work, count)
+    work[count++] = to
+    insertionSort(work, count)
+    for (let k = 0; k + 1 < count; k++) {
+      const a = work[k]!
+      const b = work[k + 1]!
+      readVertices(row, terms, a, b, crests, read)
+      read(b)
+    }
+  }
+  return { value, lead }
+}
+
+/** Value of the sum with the train at `lead`. */
+export const valueAt = (
+  row: Row,
+  terms: readonly SweepTerm[],
+  lead: number,
+  crests: readonly Crests[] = terms.map(() => makeCrests(row.offsets.length)),
+): number => {
+  let sum = 0
+  for (let t = 0; t < terms.length; t++) {
+    const term = terms[t]!
+    if (term.at !== undefined) {
+      sum += term.factor * fixedMoment(row, term, term.at, lead)
+      continue
+    }
+    const found = crests[t]!
+    readCrests(row, term, lead, found)
+    sum += term.factor * found.moment[greatestCrest(found)]!
+  }
+  return sum
+}
+
+/** Where the term is read at this lead: its fixed station, or its greatest crest (the leftmost of equal ones). */
+export const stationAt = (row: Row, term: SweepTerm, lead: number): number => {
+  if (term.at !== undefined) return term.at
+  const crests = makeCrests(row.offsets.length)
+  readCrests(row, term, lead, crests)
+  return crests.station[greatestCrest(crests)]!
+}
+
+const greatestCrest = ({ count, moment }: Crests): number => {
+  let best = 0
+  for (let i = 1; i < count; i++) if (moment[i]! > moment[best]! + EQUAL * Math.abs(moment[best]!)) best = i
+  return best
+}
+
+const fixedMoment = ({ length: L, offsets, moves }: Row, term: TermLoads, x: number, lead: number): number => {
+  let M = term.left + ((term.right - term.left) * x) / L + (term.uniform * x * (L - x)) / 2
+  for (let i = 0; i < offsets.length; i++) {
+    const p = moves[i]! === 1 ? offsets[i]! + lead : offsets[i]!
+    if (p >= 0 && p <= L) M += (term.weights[i]! * Math.min(p, x) * (L - Math.max(p, x))) / L
+  }
+  return M
+}
+
+const fixedSlope = ({ length: L, offsets, moves }: Row, term: TermLoads, x: number, lead: number): number => {
+  let slope = 0
+  for (let i = 0; i < offsets.length; i++) {
+    const p = offsets[i]! + lead
+    if (moves[i]! === 1 && p >= 0 && p <= L) slope += term.weights[i]! * (p < x ? (L - x) / L : -x / L)
+  }
+  return slope
+}
+
+/** Reads the vertex of every choice of crests between a and b, where that choice holds throughout. */
+const readVertices = (
+  row: Row,
+  terms: readonly SweepTerm[],
+  a: number,
+  b: number,
+  crests: readonly Crests[],
+  read: (lead: number) => void,
+): void => {
+  const middle = (a + b) / 2
+  let slope = 0
+  let curvature = 0
+  let several = false
+  for (let t = 0; t < terms.length; t++) {
+    const term = terms[t]!
+    if (term.at !== undefined) {
+      slope += term.factor * fixedSlope(row, term, term.at, middle)
+      continue
+    }
+    const found = crests[t]!
+    readCrests(row, term, middle, found)
+    if (found.count > 1) several = true
+    slope += term.factor * found.slope[0]!
+    curvature += term.factor * found.curvature[0]!
+  }
+  if (!several) {
+    const s = middle - slope / curvature
+    if (s > a && s < b) read(s)
+    return
+  }
+  // The crests are overwritten by `read`, so the vertices are collected before any is read.
+  const vertices: number[] = []
+  let fixed = 0
+  for (const term of terms) if (term.at !== undefined) fixed += term.factor * fixedSlope(row, term, term.at, middle)
+  const choose = (t: number, slopes: number, curvatures: number): void => {
+    if (t === terms.length) {
+      const s = middle - slopes / curvatures
+      if (s > a && s < b) vertices.push(s)
+      return
+    }
+    const { at, factor } = terms[t]!
+    if (at !== undefined) {
+      choose(t + 1, slopes, curvatures)
+      return
+    }
+    const found = crests[t]!
+    for (let i = 0; i < found.count; i++)
+      choose(t + 1, slopes + factor * found.slope[i]!, curvatures + factor * found.curvature[i]!)
+  }
+  choose(0, fixed, 0)
+  for (const s of vertices) read(s)
+}
+
+/** Leads at which a moving wheel meets a support or a fixed station, ascending, closed by the bounds where there are any. */
+const eventsOf = ({ length, offsets, moves }: Row, terms: readonly SweepTerm[], low: number, high: number) => {
+  const places = new Set([0, length])
+  for (const { at } of terms) if (at !== undefined) places.add(at)
+  const events: number[] = []
+  for (let i = 0; i < offsets.length; i++)
+    if (moves[i]! === 1)
+      for (const place of places) {
+        const lead = place - offsets[i]!
+        if (lead > low && lead < high) events.push(lead)
+      }
+  if (low > -Infinity) events.push(low)
+  if (high < Infinity) events.push(high)
+  if (events.length === 0) events.push(0)
+  return Float64Array.from(events).sort()
+}
+
+const insertionSort = (list: Float64Array, count: number): void => {
+  for (let i = 1; i < count; i++) {
+    const value = list[i]!
+    let k = i - 1
+    while (k >= 0 && list[k]! > value) list[k + 1] = list[k--]!
+    list[k + 1] = value
+  }
+}

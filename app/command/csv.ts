@@ -1,4 +1,5 @@
 /** Comma-separated values as RFC 4180 writes them: CRLF, quotes doubled. Figures are SI, as in the result file. */
+import { as } from '../../core/quantity/kinds.ts'
 import type { Result } from '../../core/review/result.ts'
 import type { Review } from '../../core/review/types.ts'
 import { envelopeCurve } from '../../core/travel/envelope.ts'
@@ -32,6 +33,27 @@ export const checksCsv = (result: Result): string =>
       set,
     ]),
   ])
+
+/** Points per span at which the envelope is tabulated: both ends and 39 between. */
+const PARTS = 40
+
+/** Greatest and least moment (N m) and shear (N) of the static wheel loads along every span; stations in m along the runway. */
+export const envelopeCsv = ({ job, trains }: Review): string => {
+  const { spans, continuity } = job.runway
+  const starts = spans.map((_, span) => spans.slice(0, span).reduce((sum, length) => sum + length, 0))
+  const rows = spans.flatMap((length, span) => {
+    const stations = Array.from({ length: PARTS + 1 }, (_, i) => as('distance', starts[span]! + (length * i) / PARTS))
+    return envelopeCurve({ continuity, spans }, span, trains, stations).map(({ station, moment, shear }) => [
+      span,
+      station,
+      moment.max,
+      moment.min,
+      shear.max,
+      shear.min,
+    ])
+  })
+  return csv([['span', 'station', 'momentMax', 'momentMin', 'shearMax', 'shearMin'], ...rows])
+}
 
 const cell = (value: Cell): string => {
   if (value === null) return ''

@@ -1,7 +1,7 @@
 /** Comma-separated values: RFC 4180, and nothing that a spreadsheet would run. */
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { checksCsv, csv } from '../../app/command/csv.ts'
+import { checksCsv, csv, envelopeCsv } from '../../app/command/csv.ts'
 import { resultOf } from '../../core/review/result.ts'
 import { standIn } from '../review/stand-in.ts'
 
@@ -56,5 +56,28 @@ describe('checks.csv', () => {
     ])
     expect(rows[1]?.slice(3)).toEqual(['holds', '100000', 'N', '400000', '0.25', '1.2D + 1.6L', 'North alone'])
     expect(rows[3]?.slice(3)).toEqual(['not-covered', '', '', '', '', '', ''])
+  })
+})
+
+describe('envelope.csv', () => {
+  it('has 41 stations a span, in m, N m and N', () => {
+    const [heading, ...rows] = read(envelopeCsv(standIn))
+    expect(heading).toEqual(['span', 'station', 'momentMax', 'momentMin', 'shearMax', 'shearMin'])
+    expect(rows.map(([, station]) => Number(station))).toEqual(Array.from({ length: 41 }, (_, i) => (6 * i) / 40))
+    // 50 kN over the support and 40 kN 2 m on: 50 + 40 (6 - 2)/6 = 76.667 kN.
+    expect(Number(rows[0]?.[4])).toBeCloseTo(76_666.667, 2)
+    expect(Number(rows[40]?.[5])).toBeCloseTo(-76_666.667, 2)
+    // Midspan, 50 kN there and 40 kN at 5 m: 50 x 6/4 + 40 (6 - 5)/2 = 95 kN m.
+    expect(Number(rows[20]?.[2])).toBeCloseTo(95_000, 2)
+    expect(rows.every(([, , , least]) => least === '0')).toBe(true)
+  })
+
+  it('goes on along the runway in the next span', () => {
+    const spans = [standIn.job.runway.spans[0]!, standIn.job.runway.spans[0]!]
+    const two = { ...standIn, job: { ...standIn.job, runway: { ...standIn.job.runway, spans } } }
+    const rows = read(envelopeCsv(two)).slice(1)
+    expect(rows.map(([span]) => Number(span))).toEqual([...Array<number>(41).fill(0), ...Array<number>(41).fill(1)])
+    expect(rows.slice(41).map(([, station]) => Number(station))[40]).toBe(12)
+    expect(rows[61]?.slice(2)).toEqual(rows[20]?.slice(2))
   })
 })

@@ -79,7 +79,7 @@ const job = {
   units: 'us',
   basis: { method: 'LRFD' },
   cranes: [{ name: 'North' }],
-  runway: { spans: [m(6)] },
+  runway: { spans: [m(6)], continuity: 'simple' },
   fingerprint: '0123456789abcdef'.repeat(4),
 } as unknown as Job
 

@@ -46,14 +46,14 @@ export const envelopeCsv = ({ job, trains }: Review): string => {
     return envelopeCurve({ continuity, spans }, span, trains, stations).map(({ station, moment, shear }) => [
       span,
       station,
-      moment.max,
-      moment.min,
-      shear.max,
-      shear.min,
+      ...[moment.max, moment.min, shear.max, shear.min].map(withoutNoise),
     ])
   })
   return csv([['span', 'station', 'momentMax', 'momentMin', 'shearMax', 'shearMin'], ...rows])
 }
+
+/** To a millionth of a newton or newton metre: what lies below is the rounding of the arithmetic, and 0 should read 0. */
+const withoutNoise = (value: number): number => Math.round(value * 1e6) / 1e6 + 0
 
 const cell = (value: Cell): string => {
   if (value === null) return ''

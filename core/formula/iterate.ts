@@ -13,10 +13,16 @@ const MOST_EVALUATIONS = 200
 
 /**
  * The root of f between a and b by Brent's method (R. P. Brent, Algorithms for Minimization without Derivatives, 1973,
- * chapter 4), to within `tolerance` of x plus the spacing of numbers there. `name` is what an error is told under.
- * Throws FormulaError where the signs at a and b are alike, or f is not finite at a place visited.
+ * chapter 4), to within `tolerance` of x, by default 1e-14 of the end farther from zero. `name` is what an error is told
+ * under. Throws FormulaError where the signs at a and b are alike, or f is not finite at a place visited.
  */
-export function iterate(name: string, f: (x: number) => number, a: number, b: number, tolerance = 0): Root {
+export function iterate(
+  name: string,
+  f: (x: number) => number,
+  a: number,
+  b: number,
+  tolerance = 1e-14 * Math.max(Math.abs(a), Math.abs(b)),
+): Root {
   let evaluations = 0
   const at = (x: number): number => {
     const y = f(x)
@@ -43,10 +49,10 @@ export function iterate(name: string, f: (x: number) => number, a: number, b: nu
     const least = 2 * Number.EPSILON * Math.abs(x1) + tolerance / 2
     const half = (x2 - x1) / 2
     if (Math.abs(half) <= least || y1 === 0) return { root: x1, residual: y1, evaluations }
-    const guess =
-      Math.abs(stepBefore) >= least && Math.abs(y0) > Math.abs(y1) ? interpolate(x0, y0, x1, y1, x2, y2) : half
-    const inside =
-      guess * half > 0 && Math.abs(guess) < Math.min(1.5 * Math.abs(half) - least / 2, Math.abs(stepBefore) / 2)
+    const may = Math.abs(stepBefore) >= least && Math.abs(y0) > Math.abs(y1)
+    const guess = may ? interpolate(x0, y0, x1, y1, x2, y2) : 0
+    const most = Math.min(1.5 * Math.abs(half) - least / 2, Math.abs(stepBefore) / 2)
+    const inside = guess * half > 0 && Math.abs(guess) < most
     stepBefore = inside ? step : half
     step = inside ? guess : half
     ;[x0, y0] = [x1, y1]

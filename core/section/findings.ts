@@ -16,9 +16,9 @@ export interface SectionFinding {
 
 /**
  * Figures may differ by this much from the dimensions, far beyond three printed digits; J by more, since the fillets, whose radius is
- * seldom printed, carry up to a fifth of it.
+ * seldom printed, carry up to a quarter of it.
  */
-const [FIGURE_TOLERANCE, J_TOLERANCE] = [0.05, 0.2]
+const [FIGURE_TOLERANCE, J_TOLERANCE] = [0.05, 0.25]
 
 /**
  * A cap wider than its flange is looked at where its edge stands out by more than 0.38 sqrt(E/F_y) thicknesses, the compact limit of

@@ -199,12 +199,15 @@ const corners = (
  * Torsion constant of a rolled I with parallel flanges, fillets counted: J = 2 bf tf^3/3 + (d - 2 tf) tw^3/3 + 2 alpha D^4 - 0.420 tf^4
  * with D the diameter of the circle inscribed in the joint. F. K. El Darwish and B. G. Johnston, Torsion of Structural Shapes, ASCE
  * Journal of the Structural Division 91 (1965); coefficients from memory, confirmed by the printed J of the W shapes (test/section).
+ * Their fit ends where the web is as thick as the flange; beyond, the three rectangles alone are counted, which is less.
  */
 const torsionOfI = (bf: number, tf: number, d: number, tw: number, r: number): number => {
+  const rectangles = (2 * bf * tf ** 3 + (d - 2 * tf) * tw ** 3) / 3
+  if (tw > tf) return rectangles
   const D = ((tf + r) ** 2 + tw * (r + tw / 4)) / (2 * r + tf)
   const [web, fillet] = [tw / tf, r / tf]
   const alpha = -0.042 + 0.2204 * web + 0.1355 * fillet - 0.0865 * web * fillet - 0.0725 * web * web
-  return (2 * bf * tf ** 3 + (d - 2 * tf) * tw ** 3) / 3 + 2 * alpha * D ** 4 - 0.42 * tf ** 4
+  return rectangles + 2 * alpha * D ** 4 - 0.42 * tf ** 4
 }
 
 /**

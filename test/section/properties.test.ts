@@ -161,6 +161,11 @@ describe('rolled shape alone', () => {
     expect(section.massPerLength).toBeCloseTo(7850 * section.A, 9)
   })
 
+  test('a web thicker than the flange has the torsion constant of its rectangles', () => {
+    const section = sectionOf({ kind: 'rolled', shape: ownShape([0.4, 0.2, 0.02, 0.015, 0.02]) })
+    near(section.J, 'mm4', (2 * 200 * 15 ** 3 + 370 * 20 ** 3) / 3, 1e-3)
+  })
+
   test('r_ts by F2-7 where none is printed agrees with the printed one', () => {
     const shape = iShape('W24X76')
     const { Sx, Iy, Cw, rts } = shape.figures

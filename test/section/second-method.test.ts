@@ -208,6 +208,7 @@ describe('500 random make-ups', () => {
         const section = sectionOf(make(drawn).entry)
         for (const value of Object.values(section))
           if (typeof value === 'number') expect(value).toBeGreaterThanOrEqual(0)
+        expect(section.J).toBeGreaterThan(0)
         expect(section.Zx).toBeGreaterThan(Math.min(section.SxTop, section.SxBottom))
         expect(section.Iyc + section.Iyt).toBeLessThan(section.Iy)
         expect(section.bottom.height).toBeLessThan(section.yBar)

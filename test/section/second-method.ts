@@ -30,7 +30,7 @@ export const green = (polygons: readonly (readonly Point[])[]): Moments => {
 }
 
 /** What of each polygon lies on the side where nx x + ny y <= c. */
-export const cut = (polygons: readonly (readonly Point[])[], nx: number, ny: number, c: number): Point[][] =>
+const cut = (polygons: readonly (readonly Point[])[], nx: number, ny: number, c: number): Point[][] =>
   polygons.map((polygon) => {
     const kept: Point[] = []
     polygon.forEach((from, i) => {

@@ -37,6 +37,8 @@ const TIMES_TEN = / ?[*·] ?10 ?\^ ?([+-]?\d+)/y
 const TEN = /10 ?\^ ?([+-]?\d+)/y
 const MIXED = /(\d+)([ -])(\d+) ?\/ ?(\d+)(?![\d.,])/y
 const FRACTION = /(\d+) ?\/ ?(\d+)(?![\d.,])/y
+/** "1/2 3/4" and "1/2×10⁶": readers differ about what is divided by what. */
+const UNCLEAR_DIVISOR = /^ ?(\d+ \d+ ?\/ ?\d|[\d.,]+ ?[*·] ?10 ?\^)/
 const UNIT_WORDS = /[A-Za-z]+\.?(?: ?\^ ?\d+|\d(?!\d))?(?: ?[-·*/ ] ?[A-Za-z]+\.?(?: ?\^ ?\d+|\d(?!\d))?)*/y
 
 function parse(written: string, weighing: Weighing): Entry {
@@ -78,6 +80,7 @@ function parse(written: string, weighing: Weighing): Entry {
     for (;;) {
       const sign = next('*·/')
       if (sign === undefined) return left
+      if (sign === '/' && UNCLEAR_DIVISOR.test(text.slice(at))) refuse('divides by what needs parentheses')
       const right = signed()
       left = sign === '/' ? divide(left, right, weighing) : multiply(left, right)
     }

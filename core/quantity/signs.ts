@@ -3,8 +3,8 @@
 /** The text in plain signs, or the first sign that cannot be part of a quantity, named. */
 export function plainSigns(text: string): { readonly text: string } | { readonly strange: string } {
   const plain = text
-    .replace(/[¼-¾⅐-⅞]/g, (sign) => ` ${sign.normalize('NFKC').replace('\u2044', '/')}`)
-    .replace(/[⁻⁺]?[⁰¹²³⁴-⁹]+/g, (run) => `^${run.replace(/./g, (sign) => sign.normalize('NFKC'))}`)
+    .replace(/[¼-¾⅐-⅞]/g, (sign) => ` ${sign.normalize('NFKC').replace('\u2044', '/')} `)
+    .replace(/[⁻⁺]?[⁰¹²³⁴-⁹]+/g, (run) => `^${run.replace(/./g, (sign) => sign.normalize('NFKC'))} `)
     .replace(/[\u2010-\u2014\u2212]/g, '-')
     .replace(/[×✕✖]/g, '*')
     .replace(/[÷\u2044\u2215]/g, '/')

@@ -19,7 +19,7 @@ import {
 import { formulaLine } from './write.ts'
 
 /** What a formula is: its result, the kinds of its symbols, and its right-hand side as text. */
-export interface FormulaText<W extends Where, K extends Kind> {
+interface FormulaText<W extends Where, K extends Kind> {
   readonly gives: readonly [symbol: string, kind: K]
   readonly where: W
   readonly text: string

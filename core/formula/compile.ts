@@ -2,7 +2,7 @@
  * Expressions as nested closures over the object of values: no code is made from text, so a page that forbids it can run
  * them, and they are as good as written by hand to within a small factor.
  */
-import type { Condition, Expression } from './expression.ts'
+import { symbolsOf, type Condition, type Expression } from './expression.ts'
 import type { Numbers } from './types.ts'
 
 type Compute = (values: Numbers) => number
@@ -12,6 +12,12 @@ type Compute = (values: Numbers) => number
  * negative number give NaN, which no operation of a formula loses again: a function above never hides a fault below.
  */
 export function compile(tree: Expression, constants: Numbers): Compute {
+  const compute = compileParts(tree, constants)
+  // What has no symbol of its own is computed once: pi^2, 1.6/1.5.
+  return symbolsOf(tree).every((name) => Object.hasOwn(constants, name)) ? literal(compute({})) : compute
+}
+
+function compileParts(tree: Expression, constants: Numbers): Compute {
   const of = (part: Expression): Compute => compile(part, constants)
   switch (tree.node) {
     case 'number':
@@ -56,15 +62,18 @@ export function compileCondition(
   fault: (values: Numbers) => never,
 ): (values: Numbers) => boolean {
   if (condition.node === 'compare') {
-    const [left, right] = [compile(condition.left, {}), compile(condition.right, {})]
-    const sides = (values: Numbers, test: (a: number, b: number) => boolean): boolean => {
-      const [a, b] = [left(values), right(values)]
-      return Number.isFinite(a) && Number.isFinite(b) ? test(a, b) : fault(values)
-    }
+    const left = compile(condition.left, {})
+    const right = compile(condition.right, {})
     const test = TESTS[condition.op]
-    return (values) => sides(values, test)
+    return (values) => {
+      const a = left(values)
+      const b = right(values)
+      // The difference is finite where both are; two far ends of the number line are no lengths or loads.
+      return Number.isFinite(a - b) ? test(a, b) : fault(values)
+    }
   }
-  const [left, right] = [compileCondition(condition.left, fault), compileCondition(condition.right, fault)]
+  const left = compileCondition(condition.left, fault)
+  const right = compileCondition(condition.right, fault)
   return condition.node === 'and'
     ? (values) => left(values) && right(values)
     : (values) => left(values) || right(values)

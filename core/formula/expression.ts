@@ -25,7 +25,7 @@ export type Condition =
 
 /** The functions a formula may use, with the least and greatest number of arguments. */
 const FUNCTIONS = { sqrt: [1, 1], cbrt: [1, 1], abs: [1, 1], min: [2, Infinity], max: [2, Infinity] } as const
-export type FunctionName = keyof typeof FUNCTIONS
+type FunctionName = keyof typeof FUNCTIONS
 
 /** Reads a formula's right-hand side. Throws, naming the part, for whatever is no formula. */
 export function readExpression(text: string): Expression {

@@ -2,7 +2,7 @@
 import { DOCUMENTS, type ChapterOf, type Document, type DocumentKey } from './bibliography.ts'
 
 /** A clause of one document: begins with one of its chapters, or is the commentary to one. `equation` is the printed number. */
-export interface ClauseOf<D extends DocumentKey> {
+interface ClauseOf<D extends DocumentKey> {
   readonly document: D
   readonly clause: `${'' | 'Commentary '}${ChapterOf<D>}${string}`
   readonly equation?: string

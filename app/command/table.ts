@@ -24,16 +24,17 @@ export const reviewTable = (review: Review): string => {
       '',
       ...list('Always', STANDING_CAUTIONS),
       '',
+      ...list('Editions', review.editions),
+      '',
       ...wrap(verdict(review), 0),
     ].join('\n') + '\n',
   )
 }
 
-const heading = ({ program, job, section, editions }: Review): readonly string[] => [
+const heading = ({ program, job, section }: Review): readonly string[] => [
   ...wrap(job.project.title, 0),
   ...wrap(`${section.name}, ${spansText(job.runway.spans, job.units)}`, 0),
-  ...wrap(`${[...editions].join(', ')}; ${job.basis.method}`, 0),
-  `fingerprint ${job.fingerprint.slice(0, 12)}, longtravel ${program}`,
+  `${job.basis.standard.toUpperCase()} rules, ${job.basis.method}; fingerprint ${job.fingerprint.slice(0, 12)}; longtravel ${program}`,
 ]
 
 const spansText = (spans: readonly number[], units: UnitSystem): string =>

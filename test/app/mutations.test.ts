@@ -42,6 +42,8 @@ const scale =
       holder[key] = value.replace(/\d+(\.\d+)?/, (figure) => String(Number(figure) * factor))
   }
 
+const isFigure = ({ holder, key }: Spot): boolean => typeof holder[key] === 'string' && /^\d/.test(holder[key])
+
 const drop: Spoil = ({ holder, key }) => {
   if (Array.isArray(holder)) holder.splice(Number(key), 1)
   else Reflect.deleteProperty(holder, key)
@@ -80,8 +82,6 @@ const words = [
 ]
 
 const spoil: fc.Arbitrary<Spoil> = fc.oneof(
-  { weight: 6, arbitrary: fc.double({ min: -9, max: 9, noNaN: true }).map((power) => scale(10 ** power)) },
-  { weight: 6, arbitrary: fc.double({ min: 0.3, max: 3, noNaN: true }).map(scale) },
   { weight: 3, arbitrary: fc.constantFrom(...words).map(put) },
   { weight: 2, arbitrary: fc.double().map(put) },
   { weight: 2, arbitrary: fc.string().map(put) },
@@ -94,6 +94,19 @@ const spoil: fc.Arbitrary<Spoil> = fc.oneof(
       put(1)({ holder, key }, job)
     }),
   },
+)
+
+/** What may be spoilt in a change, and how: figures moved within reason or beyond it, or anything made anything. */
+const change = fc.oneof(
+  {
+    weight: 6,
+    arbitrary: fc.double({ min: 0.3, max: 3, noNaN: true }).map((factor) => [isFigure, scale(factor)] as const),
+  },
+  {
+    weight: 2,
+    arbitrary: fc.double({ min: -9, max: 9, noNaN: true }).map((power) => [isFigure, scale(10 ** power)] as const),
+  },
+  { weight: 3, arbitrary: spoil.map((anything) => [() => true, anything] as const) },
 )
 
 /** The text itself cut short, with a piece missing or put twice. */
@@ -112,15 +125,15 @@ const torn = (text: string, how: string, from: number, length: number): string =
 const mutated = fc
   .record({
     sample: fc.constantFrom(...samples),
-    changes: fc.array(fc.tuple(fc.nat(), spoil), { minLength: 1, maxLength: 3 }),
+    changes: fc.array(fc.tuple(fc.nat(), change), { minLength: 1, maxLength: 3 }),
     tear,
   })
   .map(({ sample, changes, tear: hole }) => {
     const job = JSON.parse(sample) as Json
-    for (const [pick, change] of changes) {
-      const spots = spotsOf(job)
+    for (const [pick, [may, spoilt]] of changes) {
+      const spots = spotsOf(job).filter(may)
       const spot = spots[pick % spots.length]
-      if (spot !== undefined) change(spot, job)
+      if (spot !== undefined) spoilt(spot, job)
     }
     const text = JSON.stringify(job, null, 2)
     return hole === undefined ? text : torn(text, hole.how, hole.at, hole.length)

@@ -16,8 +16,8 @@ describe('the table of a review', () => {
     expect(lines.slice(0, 4)).toEqual([
       'A made-up bay',
       `W24X84, span 19' 8 1/4"`,
-      'AISC 360-22, ASCE 7-22; LRFD',
-      'fingerprint 0123456789ab, longtravel 0.1.0',
+      'US rules, LRFD; fingerprint 0123456789ab; longtravel 0.1.0',
+      '',
     ])
   })
 
@@ -51,9 +51,10 @@ describe('the table of a review', () => {
     expect(table).toContain('  Bearing stiffeners (AISC 360-22 J10.8): there are none\n')
   })
 
-  it('ends with the cautions and the verdict', () => {
+  it('ends with cautions, editions and the verdict', () => {
     expect(table).toContain('The deflection is that of one crane.')
     expect(table).toContain('checked independently')
+    expect(table).toContain('Editions\n  AISC 360-22\n  ASCE 7-22\n')
     expect(lines.at(-2)).toBe('1 check fails. Governing: Bending about the strong axis, utilisation 1.001.')
     expect(withChecks([holding], true)).toMatch(/All checks hold\.\n$/)
     expect(withChecks([holding, open], null)).toMatch(/Nothing fails, but 1 subject is not covered\.\n$/)

@@ -77,7 +77,7 @@ export const idle: Check = {
 const job = {
   project: { title: 'A made-up bay' },
   units: 'us',
-  basis: { method: 'LRFD' },
+  basis: { standard: 'us', method: 'LRFD' },
   cranes: [{ name: 'North' }],
   runway: { spans: [m(6)], continuity: 'simple' },
   fingerprint: '0123456789abcdef'.repeat(4),

@@ -5,6 +5,7 @@ import {
   add,
   bare,
   divide,
+  kept,
   multiply,
   negative,
   refuse,
@@ -122,7 +123,7 @@ function parse(written: string, weighing: Weighing): Entry {
     const inches = unit === 'ft' ? inchesAfterFeet(mark) : undefined
     if (inches === undefined) return withUnit(number.value, unit, weighing)
     if (!/^\d+$/.test(/^[\d.,]+/.exec(text.slice(start))?.[0] ?? '')) refuse('has inches after feet that are not whole')
-    return { si: fromUnit(12 * number.value + inches, 'in'), dimension: DIMENSIONS.length, units: ['ft'] }
+    return { si: kept(fromUnit(12 * number.value + inches, 'in')), dimension: DIMENSIONS.length, units: ['ft'] }
   }
 
   const literal = () => {

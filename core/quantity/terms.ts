@@ -39,9 +39,10 @@ export function withUnit(count: number, unit: Unit, weighing: Weighing): Term {
 const weightOf = (unit: Unit): Dimension => (unit.includes('/') ? DIMENSIONS.lineLoad : DIMENSIONS.force)
 
 /** Holds what arithmetic gives to numbers that a double can carry. */
-function kept(result: number, ...factors: readonly number[]): number {
+export function kept(result: number, ...factors: readonly number[]): number {
   if (!Number.isFinite(result)) return refuse('is too large a number')
-  if (result === 0 && factors.every((factor) => factor !== 0)) return refuse('is too small a number')
+  if (result === 0 && factors.length > 0 && factors.every((factor) => factor !== 0))
+    return refuse('is too small a number')
   return result
 }
 

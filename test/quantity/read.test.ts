@@ -214,6 +214,7 @@ describe('what cannot be read is refused', () => {
     ['Infinity m', 'distance', /does not begin with a number/],
     ['∞ m', 'distance', /has the sign “∞” \(U\+221E\)/],
     ['1e400 m', 'distance', /too large/],
+    ['1e308\' 6"', 'distance', /too large/],
     ['1e308 kip', 'force', /too large/],
     ['1e300 m * 1e300', 'distance', /too large/],
     ['1e-400 m', 'distance', /too small/],

@@ -7,6 +7,12 @@ import { placed, seen, type Walked } from './walk.ts'
 
 /** Throws where an entry is missing that the dictionary requires: only without findings may a job be completed. */
 export const complete = (walked: Walked, fingerprint: string): Job => ({
+  ...entries(walked),
+  fingerprint,
+  defaults: [...walked.defaults.values()],
+})
+
+const entries = (walked: Walked): Omit<Job, 'fingerprint' | 'defaults'> => ({
   project: present<Job['project']>({
     title: given(walked, 'project.title'),
     number: given(walked, 'project.number'),
@@ -23,8 +29,6 @@ export const complete = (walked: Walked, fingerprint: string): Job => ({
   cranes: given(walked, 'cranes').map((_, index) => crane(walked, index)),
   runway: runway(walked),
   girder: girder(walked),
-  fingerprint,
-  defaults: [...walked.defaults.values()],
 })
 
 const basis = (walked: Walked): Basis => ({
@@ -116,11 +120,17 @@ const runway = (walked: Walked): Runway => {
 
 const girder = (walked: Walked): Girder => {
   const steel = (path: SteelPath): SteelEntry | undefined => (seen(walked, path) ? steelOf(walked, path) : undefined)
+  const made = section(walked)
+  // Where there is nothing of a steel, its default says nothing.
+  if (!made.cap) walked.defaults.delete('girder.capSteel')
+  if (made.kind === 'rolled' && made.cap?.kind !== 'plate') walked.defaults.delete('girder.plateSteel')
+  const plateSteel = steel('girder.plateSteel')
+  if (plateSteel && made.cap?.kind === 'plate') show(walked, 'girder.capSteel', 'the steel of the plates')
   return present<Girder>({
-    section: section(walked),
+    section: made,
     steel: steel('girder.steel')!,
-    capSteel: steel('girder.capSteel'),
-    plateSteel: steel('girder.plateSteel'),
+    capSteel: steel('girder.capSteel') ?? (made.cap?.kind === 'plate' ? plateSteel : undefined),
+    plateSteel,
     addedDeadLoad: given(walked, 'girder.addedDeadLoad'),
     addedLiveLoad: given(walked, 'girder.addedLiveLoad'),
   })

@@ -9,4 +9,7 @@ import type { Json } from './json.ts'
  * after upgrade, without defaults. Throws on numbers that are not finite and on broken surrogate pairs, which no job read
  * without findings holds.
  */
-export const fingerprint = (json: Json): string => bytesToHex(sha256(utf8ToBytes(canonicalize(json) ?? '')))
+export const fingerprint = (json: Json): string => digest(canonicalize(json) ?? '')
+
+/** SHA-256 of a text in UTF-8, as 64 hexadecimal digits. */
+export const digest = (text: string): string => bytesToHex(sha256(utf8ToBytes(text)))

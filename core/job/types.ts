@@ -127,8 +127,9 @@ export interface SteelEntry {
 export interface Girder {
   readonly section: SectionEntry
   readonly steel: SteelEntry
-  /** Undefined: the girder's own steel. */
+  /** Undefined: the girder's own steel; a cap plate of `plateSteel` has it here as well. */
   readonly capSteel?: SteelEntry
+  /** Of a welded girder's plates; undefined: the girder's own steel. */
   readonly plateSteel?: SteelEntry
   readonly addedDeadLoad: NewtonPerMetre
   readonly addedLiveLoad: NewtonPerMetre

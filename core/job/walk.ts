@@ -1,6 +1,7 @@
 /** Goes through a job with the dictionary: every entry read to SI, every default taken, every fault noted with its path. */
 import type { Catalogue } from '../catalogue/types.ts'
 import { readQuantity } from '../quantity/read.ts'
+import { echo } from '../quantity/signs.ts'
 import type { Entry, Field, NumberEntry, QuantityEntry, Way } from './field.ts'
 import { isRefused } from './field.ts'
 import { fieldsBelow, type FieldPath, type FieldValue } from './fields.ts'
@@ -135,7 +136,7 @@ const readField = (tools: Tools, field: Field, json: Json, pattern: string, path
 /** The value in SI, or undefined once a finding is noted. */
 const readEntry = (tools: Tools, field: Field, entry: Entry, json: Json, pattern: string, path: string): unknown => {
   const { walked, catalogue } = tools
-  const wrong = (message = `must be ${inWords(entry)}`): undefined => {
+  const wrong = (message = `must be ${inWords(entry)}`): unknown => {
     find(walked, path, json, `${field.name}: ${message}`)
     return undefined
   }
@@ -155,7 +156,7 @@ const readEntry = (tools: Tools, field: Field, entry: Entry, json: Json, pattern
       if (typeof json !== 'number' && typeof json !== 'string') return wrong()
       if (typeof json === 'number' && !Number.isFinite(json)) return wrong(`must lie ${limitsInWords(entry)}`)
       const read = readQuantity(json, entry.kind)
-      if (!read.ok) return wrong(`${read.message} Right would be ${inWords(entry)}`)
+      if (!read.ok) return wrong(read.message)
       return within(entry, read.value) ? read.value : wrong(`must lie ${limitsInWords(entry)}`)
     }
     case 'lookUp': {
@@ -250,7 +251,11 @@ const readInWords = (json: Json | undefined): string => {
   if (json === undefined) return 'nothing'
   if (Array.isArray(json)) return json.length <= 12 ? shorten(JSON.stringify(json)) : `a list of ${json.length} values`
   if (isObject(json)) return `an object with ${Object.keys(json).length} fields`
-  return typeof json === 'string' ? JSON.stringify(shorten(json)) : String(json)
+  if (typeof json === 'string') return echo(json)
+  return typeof json === 'number' ? String(json) : JSON.stringify(json)
 }
 
-const defaultInWords = (entry: Json | undefined): string => (Array.isArray(entry) ? entry.join(', ') : String(entry))
+const defaultInWords = (entry: Json | undefined): string => {
+  if (Array.isArray(entry)) return entry.join(', ')
+  return typeof entry === 'string' ? entry : JSON.stringify(entry)
+}

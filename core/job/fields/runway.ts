@@ -4,10 +4,6 @@ import { dimension, distance, flag, object, share } from './entries.ts'
 
 const span = { is: 'quantity', kind: 'distance', from: '0.1 m', to: '100 m' } as const
 const detail = { is: 'quantity', kind: 'length', from: '0 mm', to: '10 m' } as const
-const notMade = {
-  text: 'none; the checks that need it are not covered',
-  source: 'AISC 360-22 J10, no default stands there',
-} as const
 
 export const RUNWAY = {
   runway: { name: 'Runway', meaning: 'The line of girders and its rail.', entry: object, required: true },
@@ -135,9 +131,8 @@ export const RUNWAY = {
   },
   'runway.bearingLength': {
     name: 'Length of bearing',
-    meaning: 'Of the girder on its support, along the span.',
+    meaning: 'Of the girder on its support, along the span. Left out, the checks that need it are not covered.',
     entry: { is: 'quantity', kind: 'length', above: '0 mm', to: '5 m' },
-    default: notMade,
   },
   'runway.bracketEccentricity': {
     name: 'Eccentricity on the bracket',
@@ -147,9 +142,9 @@ export const RUNWAY = {
   },
   'runway.endDistance': {
     name: 'End distance',
-    meaning: 'From the centre of the bearing to the end of the girder.',
+    meaning:
+      'From the centre of the bearing to the end of the girder. Left out, the checks that need it are not covered.',
     entry: detail,
-    default: notMade,
   },
   'runway.stop': { name: 'Stop', meaning: 'End stop and bumper.', entry: object, notCovered: 'all' },
   'runway.stop.bumperStroke': {

@@ -3,7 +3,7 @@ import type { Channel, IShape } from '../catalogue/types.ts'
 import type { Plate, SectionEntry } from '../job/types.ts'
 import { as, type Kind, type UnitSystem } from '../quantity/kinds.ts'
 import { writeNumber, writeQuantity } from '../quantity/write.ts'
-import { drawnI, filletRadius } from './parts.ts'
+import { drawnI, filletRadius, torsionFitHolds } from './parts.ts'
 import { plasticAxis } from './plastic.ts'
 
 /** A make-up with a refusal has no properties worth computing; a caution is told beside the result. */
@@ -16,9 +16,9 @@ export interface SectionFinding {
 
 /**
  * Figures may differ by this much from the dimensions, far beyond three printed digits; J by more, since the fillets, whose radius is
- * seldom printed, carry up to a quarter of it.
+ * seldom printed, carry up to a fifth of it.
  */
-const [FIGURE_TOLERANCE, J_TOLERANCE] = [0.05, 0.25]
+const [FIGURE_TOLERANCE, J_TOLERANCE] = [0.05, 0.2]
 
 /**
  * A cap wider than its flange is looked at where its edge stands out by more than 0.38 sqrt(E/F_y) thicknesses, the compact limit of
@@ -94,7 +94,7 @@ function figuresApart(shape: IShape, units: UnitSystem): SectionFinding[] {
     ['Iy', 'inertia', drawn.Iy],
     ['Sy', 'modulus', (2 * drawn.Iy) / shape.bf],
     ['Zy', 'modulus', drawn.Zy],
-    ['J', 'inertia', drawn.J],
+    ['J', 'inertia', torsionFitHolds(shape) ? drawn.J : undefined],
     ['Cw', 'warping', (drawn.Iy * ho ** 2) / 4],
     ['rts', 'length', Math.sqrt((drawn.Iy * ho * shape.d) / (4 * drawn.Ix))],
     ['ho', 'length', ho],
@@ -103,8 +103,8 @@ function figuresApart(shape: IShape, units: UnitSystem): SectionFinding[] {
   const found: SectionFinding[] = []
   for (const [name, kind, byDimensions] of compared) {
     const figure = shape.figures[name]
-    if (figure === undefined || Math.abs(figure / byDimensions - 1) <= (name === 'J' ? J_TOLERANCE : FIGURE_TOLERANCE))
-      continue
+    if (figure === undefined || byDimensions === undefined) continue
+    if (Math.abs(figure / byDimensions - 1) <= (name === 'J' ? J_TOLERANCE : FIGURE_TOLERANCE)) continue
     const apart = writeNumber(100 * (figure / byDimensions - 1), 2)
     found.push({
       level: 'caution',

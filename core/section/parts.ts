@@ -111,12 +111,12 @@ export const rolledI = (shape: IShape): Part => {
 
 /** A rolled I from its dimensions alone: flanges, web and fillets. */
 export const drawnI = (shape: IShape): Part => {
-  const { d, bf, tw, tf } = shape
+  const { d, tw } = shape
   const { tip, root } = flangeThickness(shape)
   const r = filletRadius(shape)
   const parts = [rolledFlange(shape, 0, 1), standingPlate(d - 2 * tip, tw, tip), rolledFlange(shape, d, -1)]
   if (r > 0) parts.push(fillets(r, tw / 2, root, 1), fillets(r, tw / 2, d - root, -1))
-  return { ...join(parts), J: torsionOfI(bf, tf, d, tw, r) }
+  return { ...join(parts), J: torsionOfI(shape, r) }
 }
 
 /**
@@ -195,15 +195,22 @@ const corners = (
   }
 }
 
+/** Whether the torsion constant by dimensions counts the fillets: parallel flanges no thinner than the web. */
+export const torsionFitHolds = (shape: IShape): boolean => {
+  const { tip, root } = flangeThickness(shape)
+  return tip === root && shape.tw <= shape.tf
+}
+
 /**
  * Torsion constant of a rolled I with parallel flanges, fillets counted: J = 2 bf tf^3/3 + (d - 2 tf) tw^3/3 + 2 alpha D^4 - 0.420 tf^4
  * with D the diameter of the circle inscribed in the joint. F. K. El Darwish and B. G. Johnston, Torsion of Structural Shapes, ASCE
  * Journal of the Structural Division 91 (1965); coefficients from memory, confirmed by the printed J of the W shapes (test/section).
- * Their fit ends where the web is as thick as the flange; beyond, the three rectangles alone are counted, which is less.
+ * Beyond the range of their fit the three rectangles alone are counted.
  */
-const torsionOfI = (bf: number, tf: number, d: number, tw: number, r: number): number => {
+const torsionOfI = (shape: IShape, r: number): number => {
+  const { d, bf, tw, tf } = shape
   const rectangles = (2 * bf * tf ** 3 + (d - 2 * tf) * tw ** 3) / 3
-  if (tw > tf) return rectangles
+  if (!torsionFitHolds(shape)) return rectangles
   const D = ((tf + r) ** 2 + tw * (r + tw / 4)) / (2 * r + tf)
   const [web, fillet] = [tw / tf, r / tf]
   const alpha = -0.042 + 0.2204 * web + 0.1355 * fillet - 0.0865 * web * fillet - 0.0725 * web * web

@@ -245,6 +245,8 @@ describe('what cannot be read is refused', () => {
       '1,250',
       '7,5',
       '1e9',
+      '1e308',
+      '1e-308',
       '0',
       '7/8',
       ' ',

@@ -50,7 +50,7 @@ function compileParts(tree: Expression, constants: Numbers): Compute {
       }
     }
     case 'power':
-      return power(of(tree.base), tree.value)
+      return tree.value === undefined ? powerOf(of(tree.base), of(tree.exponent)) : power(of(tree.base), tree.value)
     case 'function':
       return call(tree.name, tree.args.map(of))
   }
@@ -121,6 +121,14 @@ function power(base: Compute, exponent: number): Compute {
       return value === 0 || Number.isNaN(value) ? NaN : value ** exponent
     }
   return (values) => base(values) ** exponent
+}
+
+function powerOf(base: Compute, exponent: Compute): Compute {
+  return (values) => {
+    const value = base(values)
+    const to = exponent(values)
+    return Number.isNaN(value) || (value === 0 && to <= 0) ? NaN : value ** to
+  }
 }
 
 function call(name: 'sqrt' | 'cbrt' | 'abs' | 'min' | 'max', args: readonly Compute[]): Compute {

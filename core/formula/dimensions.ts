@@ -22,7 +22,10 @@ export function dimensionOf(tree: Expression, kindOf: (symbol: string) => Kind):
     case 'quotient':
       return combine(of(tree.left), of(tree.right), -1)
     case 'power':
-      return scale(of(tree.base), tree.value)
+      if (tree.value !== undefined) return scale(of(tree.base), tree.value)
+      if (!sameDimension(of(tree.base), NONE) || !sameDimension(of(tree.exponent), NONE))
+        throw new Error(`"${plainExpression(tree)}" has an exponent that is no number, and is not a ratio to a ratio`)
+      return NONE
     case 'function':
       switch (tree.name) {
         case 'sqrt':

@@ -10,7 +10,13 @@ export type Expression =
       readonly left: Expression
       readonly right: Expression
     }
-  | { readonly node: 'power'; readonly base: Expression; readonly exponent: Expression; readonly value: number }
+  /** `value` where the exponent is a plain number, as it must be unless the base is a ratio. */
+  | {
+      readonly node: 'power'
+      readonly base: Expression
+      readonly exponent: Expression
+      readonly value: number | undefined
+    }
   | { readonly node: 'negative'; readonly of: Expression }
   | { readonly node: 'function'; readonly name: FunctionName; readonly args: readonly Expression[] }
 
@@ -47,6 +53,7 @@ export function symbolsOf(tree: Expression | Condition): readonly string[] {
         break
       case 'power':
         visit(part.base)
+        visit(part.exponent)
         break
       case 'negative':
         visit(part.of)
@@ -121,11 +128,7 @@ function fromNode(node: Node, numbers: Iterator<string>): Expression {
       const [left, right] = [fromNode(args[0]!, numbers), args[1] && fromNode(args[1], numbers)]
       if (node.implicit === true) return refuse('leaves out a multiplication sign')
       if (right === undefined) return node.op === '-' ? { node: 'negative', of: left } : refuse('is no operation here')
-      if (node.op === '^') {
-        const value = constant(right)
-        if (value === undefined) return refuse('has an exponent that is not a number')
-        return { node: 'power', base: left, exponent: right, value }
-      }
+      if (node.op === '^') return { node: 'power', base: left, exponent: right, value: constant(right) }
       const name = BINARY[node.op as keyof typeof BINARY] as (typeof BINARY)[keyof typeof BINARY] | undefined
       return name ? { node: name, left, right } : refuse('is no operation of a formula')
     }

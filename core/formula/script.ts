@@ -12,6 +12,8 @@ export interface Script {
   /** A number and its unit, which may be none. */
   quantity(number: string, unit: Unit): string
   words(text: string): string
+  /** The bound behind an equation: "<= M_p", or complete, "0.35 <= k_c <= 0.76". */
+  bound(inner: string, complete: boolean): string
   /** A sign between two parts: what is printed of a sum, a product or a relation. */
   sign(sign: Sign): string
   fraction(top: string, bottom: string): string
@@ -32,6 +34,7 @@ export const plain: Script = {
   symbol: (name) => name,
   quantity: (number, unit) => (unit === '' ? number : `${number} ${writeUnit(unit)}`),
   words: (text) => text,
+  bound: (inner) => ` (${inner.trim()})`,
   sign: (sign) => (sign === 'beside' ? ' ' : sign === ',' ? ', ' : ` ${sign === 'times' ? '*' : sign} `),
   fraction: (top, bottom) => `${top}/${bottom}`,
   power: (base, exponent) => `${base}^${exponent}`,
@@ -49,6 +52,7 @@ export const mathml: Script = {
   quantity: (number, unit) =>
     unit === '' ? mathNumber(number) : `<mrow>${mathNumber(number)}<mspace width="0.2em"/>${mathUnit(unit)}</mrow>`,
   words: (text) => `<mtext>${escaped(text)}</mtext>`,
+  bound: (inner, complete) => (complete ? `${SIGNS[',']}${inner}` : inner),
   sign: (sign) => SIGNS[sign],
   fraction: (top, bottom) => `<mfrac>${row(top)}${row(bottom)}</mfrac>`,
   power: (base, exponent) => `<msup>${row(base)}${row(exponent)}</msup>`,

@@ -120,16 +120,14 @@ function compareLine(step: Extract<Step, { step: 'compare' }>, system: UnitSyste
   return { kind: 'compare', clause: '', symbols: math(symbols), values: math(values), text: withNote(text, note), note }
 }
 
-/** The least and greatest value a formula may give: "<= M_p", or where both stand "(0.35 <= k_c <= 0.76)". */
+/** The least and greatest value a formula may give. */
 function bounds({ symbol, atLeast, atMost }: Formula, script: Script): string {
   const most = atMost && setSymbols(atMost, script)
   const least = atLeast && setSymbols(atLeast, script)
-  if (most !== undefined && least !== undefined) {
-    const both = `${least}${script.sign('<=')}${script.symbol(symbol)}${script.sign('<=')}${most}`
-    return `${script.sign(',')}${both}`
-  }
-  if (most !== undefined) return `${script.sign('<=')}${most}`
-  return least === undefined ? '' : `${script.sign('>=')}${least}`
+  const [to, from] = [script.sign('<='), script.sign('>=')]
+  if (most === undefined) return least === undefined ? '' : script.bound(`${from}${least}`, false)
+  if (least === undefined) return script.bound(`${to}${most}`, false)
+  return script.bound(`${least}${to}${script.symbol(symbol)}${to}${most}`, true)
 }
 
 /** "= 1.1 (50 ksi) ... = 610 kip-in = 50.8 kip-ft"; where a bound governs it says so and goes on from the bound. */

@@ -45,6 +45,20 @@ describe('a formula', () => {
     expect([at(16), at(64), at(400)]).toEqual([0.76, 0.5, 0.35])
   })
 
+  it('raises a ratio to a ratio', () => {
+    const E3_2 = chapter('AISC 360-22', 'E3').formula('E3-2', {
+      gives: ['F_n', 'stress'],
+      where: { F_y: 'stress', F_e: 'stress' },
+      text: '0.658^(F_y/F_e)*F_y',
+    })
+    const values = { F_y: girder.F_y, F_e: of('stress', 40, 'ksi') }
+    expect(inUnit(E3_2.value(values), 'ksi')).toBeCloseTo(0.658 ** (50 / 40) * 50, 10)
+    expect(E3_2.working(values, 'us').text).toBe(
+      'F_n = 0.658^(F_y/F_e) F_y = 0.658^[(50 ksi)/(40 ksi)] (50 ksi) = 29.63 ksi',
+    )
+    expect(() => E3_2.value({ ...values, F_e: of('stress', 0, 'ksi') })).toThrow(FormulaError)
+  })
+
   it('takes constants with a unit of their own', () => {
     const J10_6 = chapter('AISC 360-22', 'J10').formula('J10-6', {
       gives: ['R_n', 'force'],
@@ -133,8 +147,9 @@ describe('what a formula is refused for when it is loaded', () => {
     ['sqrt(a, 2)', 'ratio', ['a'], 'has 2 arguments'],
     ['min(a)', 'ratio', ['a'], 'has 1 arguments'],
     ['2 a', 'ratio', ['a'], 'leaves out a multiplication sign'],
-    ['a^a', 'ratio', ['a'], 'has an exponent that is not a number'],
-    ['a^(1/0)', 'ratio', ['a'], 'has an exponent that is not a number'],
+    ['L^a', 'ratio', ['L', 'a'], '"L^a" has an exponent that is no number, and is not a ratio to a ratio'],
+    ['2^L', 'ratio', ['L'], '"2^L" has an exponent that is no number'],
+    ['L^(1/0)', 'ratio', ['L'], 'has an exponent that is no number'],
     ['a!', 'ratio', ['a'], 'is no operation here'],
     ['+a', 'ratio', ['a'], 'is no operation here'],
     ['a mod 2', 'ratio', ['a'], 'is no operation of a formula'],

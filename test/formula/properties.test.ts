@@ -32,6 +32,7 @@ const { text } = fc.letrec<{ text: string; leaf: string; number: string }>((tie)
       .tuple(tie('text'), fc.constantFrom('2', '3', '0.5', '(1/3)', '-1', '(-2)', '1.5', '0'))
       .map(([base, n]) => `(${base})^${n}`),
     tie('leaf').map((inner) => `${inner}^2`),
+    fc.tuple(tie('leaf'), tie('text')).map(([base, n]) => `${base}^(${n})`),
     tie('text').map((inner) => `-(${inner})`),
     tie('leaf').map((inner) => `-${inner}`),
     fc.tuple(fc.constantFrom('sqrt', 'abs', 'cbrt'), tie('text')).map(([name, inner]) => `${name}(${inner})`),
@@ -75,7 +76,7 @@ describe('on random formulas', () => {
         } catch (error) {
           // Refused although finite: only where a zero divisor was hidden by what stands round it.
           expect(error).toBeInstanceOf(FormulaError)
-          expect(text).toMatch(/\/|\^-1|\^\(-2\)|\^0/)
+          expect(text).toMatch(/\/|\^/)
           return
         }
         compared += 1

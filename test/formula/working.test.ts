@@ -57,7 +57,9 @@ describe('a formula in a working', () => {
   it('says where its bound governs', () => {
     const raised = { ...girder, C_b: 1.9 }
     const [line] = texts((on) => on.take(F2_2, raised))
-    expect(line).toMatch(/^M_n = C_b \{.*\} <= M_p = 1\.9 \{.*\} = 14,6\d\d kip-in > M_p = 12,200 kip-in, so M_n = /)
+    expect(line).toMatch(
+      /^M_n = C_b \{.*\} \(<= M_p\) = 1\.9 \{.*\} = 14,6\d\d kip-in > M_p = 12,200 kip-in, so M_n = /,
+    )
     expect(line).toMatch(/, so M_n = 12,200 kip-in = 1,017 kip-ft$/)
     expect(texts((on) => on.take(F2_2, girder))[0]).not.toContain('so M_n')
 
@@ -69,7 +71,7 @@ describe('a formula in a working', () => {
     })
     const values = { F_y: girder.F_y, Z_y: of('modulus', 50, 'in3'), S_y: of('modulus', 30, 'in3') }
     expect(minor.working(values, 'us').text).toBe(
-      'M_p = F_y Z_y <= 1.6 F_y S_y = (50 ksi) (50 in³) = 2,500 kip-in' +
+      'M_p = F_y Z_y (<= 1.6 F_y S_y) = (50 ksi) (50 in³) = 2,500 kip-in' +
         ' > 1.6 F_y S_y = 1.6 (50 ksi) (30 in³) = 2,400 kip-in, so M_p = 2,400 kip-in = 200 kip-ft',
     )
 
@@ -82,9 +84,9 @@ describe('a formula in a working', () => {
     })
     const line_k = (h: number): string =>
       k_c.working({ h: of('length', h, 'in'), t_w: of('length', 1, 'in') }, 'us').text
-    expect(line_k(64)).toBe('k_c = 4/sqrt(h/t_w), 0.35 <= k_c <= 0.76 = 4/sqrt((64 in)/(1 in)) = 0.5')
+    expect(line_k(64)).toBe('k_c = 4/sqrt(h/t_w) (0.35 <= k_c <= 0.76) = 4/sqrt((64 in)/(1 in)) = 0.5')
     expect(line_k(400)).toBe(
-      'k_c = 4/sqrt(h/t_w), 0.35 <= k_c <= 0.76 = 4/sqrt((400 in)/(1 in)) = 0.2 < 0.35, so k_c = 0.35',
+      'k_c = 4/sqrt(h/t_w) (0.35 <= k_c <= 0.76) = 4/sqrt((400 in)/(1 in)) = 0.2 < 0.35, so k_c = 0.35',
     )
   })
 
@@ -118,7 +120,7 @@ describe('cases in a working', () => {
     })
     expect(formula).toMatchObject({ kind: 'formula', clause: 'AISC 360-22 F2-2' })
     expect(formula!.text).toBe(
-      'M_n = C_b {M_p - (M_p - 0.7 F_y S_x) [(L_b - L_p)/(L_r - L_p)]} <= M_p' +
+      'M_n = C_b {M_p - (M_p - 0.7 F_y S_x) [(L_b - L_p)/(L_r - L_p)]} (<= M_p)' +
         ' = 1 {12,200 kip-in - [12,200 kip-in - 0.7 (50 ksi) (213 in³)] [(240 in - 87.72 in)/(249.6 in - 87.72 in)]}' +
         ' = 7,736 kip-in = 644.7 kip-ft',
     )
@@ -278,6 +280,12 @@ describe('MathML', () => {
     )
     expect(symbols).toContain('<msqrt><mi>a</mi></msqrt>')
     expect(symbols).toContain('<mroot><mrow><mi>b</mi></mrow><mn>3</mn></mroot>')
+  })
+
+  it('sets a bound as the standard does', () => {
+    const [symbols, values] = parts(F2_2.working(girder, 'us'))
+    expect(symbols).toMatch(/<mo>\]<\/mo><\/mrow><mo>≤<\/mo><msub><mi>M<\/mi><mrow><mi>p<\/mi><\/mrow><\/msub>$/)
+    expect(values).toMatch(/^<mo>=<\/mo>/)
   })
 
   it('escapes words', () => {

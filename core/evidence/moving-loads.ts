@@ -14,8 +14,8 @@ interface Problem {
   readonly spacings: readonly number[]
 }
 
-/** The problem's train on its span, asked for one effect. */
-function worst(problem: Problem, ask: (wheels: readonly number[]) => Effect) {
+/** The problem's train on its span, or on several of that length, asked for one effect. */
+function worst(problem: Problem, ask: (wheels: readonly number[]) => Effect, spans = 1) {
   const { length, force, span, loads, spacings } = problem
   const wheels = loads.map((load, index) => ({
     crane: 0,
@@ -24,7 +24,10 @@ function worst(problem: Problem, ask: (wheels: readonly number[]) => Effect) {
     load: as('force', load * UNIT[force]),
   }))
   const train: WheelTrain = { cranes: [0], turned: [false], wheels, mayMirror: true }
-  const beam = { continuity: 'simple', spans: [as('distance', span * UNIT[length])] } as const
+  const beam = {
+    continuity: 'simple',
+    spans: Array.from({ length: spans }, () => as('distance', span * UNIT[length])),
+  } as const
   const effect = ask(wheels.map((wheel) => wheel.load))
   return drive({ beam, span: 0, trains: [train], train: 0, eitherWay: true }, effect)
 }
@@ -43,6 +46,12 @@ const reaction = (wheels: readonly number[], uniform = none): Effect => ({
   wheels,
   uniform,
 })
+
+/** The greatest reaction of the support between two such spans, in loads of one wheel. */
+const bracketInWheels = (problem: Problem): number => {
+  const asked = (wheels: readonly number[]): Effect => ({ kind: 'bracketReaction', support: 1, wheels, uniform: none })
+  return worst(problem, asked, 2).value / (problem.loads[0]! * UNIT[problem.force])
+}
 
 const KASSIMALI: Problem = { length: 'm', force: 'kN', span: 15, loads: [125, 100, 50], spacings: [2, 3] }
 const GERE: Problem = { length: 'm', force: 'kN', span: 12, loads: [10, 20], spacings: [2.4] }
@@ -137,7 +146,7 @@ export const MOVING_LOADS: readonly EvidenceCase[] = [
     printed: 1.54667,
     unit: '',
     tolerance: 0.000005,
-    compute: () => bracket(CARRASCO),
+    compute: () => bracketInWheels(CARRASCO),
   },
   {
     id: 'two-equal-7-5-m-shear',

@@ -39,6 +39,8 @@ export interface Loading {
   readonly vertical: readonly number[]
   readonly top: readonly number[]
   readonly bottom: readonly number[]
+  /** Side thrust alone, without the couple. */
+  readonly thrust: readonly number[]
   /** Axial force in the girder, N. */
   readonly longitudinal: Newton
   readonly uniform: NewtonPerMetre
@@ -76,19 +78,29 @@ export const designOf = (
     eccentricity,
     headAboveCentroid: as('length', section.depth - section.yBar + runway.rail.height),
   }
-  return { ...base, loadings: loadingsOf(base), cautions: cautionsOf(base) }
+  return { ...base, loadings: loadingsOf(base, combinationsOf(basis.method)), cautions: cautionsOf(base) }
 }
 
 type Base = Omit<Design, 'loadings' | 'cautions'>
 
-function loadingsOf(base: Base): readonly Loading[] {
+/** Every train in every set of cranes, without load factors: what brackets, stops and bracing are handed. */
+export const serviceLoadings = (design: Design): readonly Loading[] => loadingsOf(design, combinationsOf('ASD'))
+
+function loadingsOf(base: Base, combinations: readonly Combination[]): readonly Loading[] {
   const { job, trains } = base
   const sets = setsOfCranes(job.basis, job.cranes)
   const loadings: Loading[] = []
-  for (const combination of combinationsOf(job.basis.method)) {
+  for (const combination of combinations) {
     const uniform = as('lineLoad', combination.dead * base.dead + combination.live * base.live)
     if (combination.live === 0) {
-      const none = { vertical: [], top: [], bottom: [], longitudinal: as('force', 0), working: base.deadWorking }
+      const none = {
+        vertical: [],
+        top: [],
+        bottom: [],
+        thrust: [],
+        longitudinal: as('force', 0),
+        working: base.deadWorking,
+      }
       loadings.push({ set: 'no crane', combination, train: undefined, uniform, ...none })
       continue
     }
@@ -126,9 +138,10 @@ const brings = (strong: Together, weak: Together, cranes: readonly number[]): bo
 
 function factored(base: Base, train: WheelTrain, set: Together, { dead, live }: Combination) {
   const { job, section, wheels, forces } = base
-  const split = job.basis.craneDeadFactor === 'split' && job.basis.method === 'LRFD'
+  const split = job.basis.craneDeadFactor === 'split'
   const vertical: number[] = []
   const flanges: FlangeForces[] = []
+  const thrust: number[] = []
   let heaviest: Working = { steps: [] }
   let longitudinal = 0
   for (const crane of train.cranes)
@@ -148,6 +161,7 @@ function factored(base: Base, train: WheelTrain, set: Together, { dead, live }: 
     on.given('P', 'force', P, `wheel of ${job.cranes[wheel.crane]!.name} with impact and load factor`)
     on.given('H', 'force', H, 'its side thrust with load factor')
     flanges.push(flangeForces(section, { H, P, a: base.railArm, e: base.eccentricity }, on))
+    thrust.push(H)
     if (P > Math.max(0, ...vertical)) heaviest = on
     vertical.push(P)
   }
@@ -155,6 +169,7 @@ function factored(base: Base, train: WheelTrain, set: Together, { dead, live }: 
     vertical,
     top: flanges.map((flange) => flange.top),
     bottom: flanges.map((flange) => flange.bottom),
+    thrust,
     longitudinal: as('force', longitudinal),
     working: heaviest,
   }

@@ -36,7 +36,7 @@ export interface QuantityEntry {
 }
 
 /** The fields of an object are the dictionary's own paths below it; `ways` are sets of fields of which one is used. */
-export interface ObjectEntry {
+interface ObjectEntry {
   readonly is: 'object'
   readonly ways?: readonly Way[]
 }

@@ -2,6 +2,8 @@
  * JSON as RFC 8259 has it, read so that nothing is lost: a name written twice in one object is reported (JSON.parse keeps the
  * last one silently), `__proto__` is a name like any other, and a fault is told with its line and column.
  */
+import { echo } from '../quantity/signs.ts'
+
 export type Json = null | boolean | number | string | readonly Json[] | JsonObject
 export interface JsonObject {
   readonly [name: string]: Json
@@ -64,7 +66,7 @@ export const parseJson = (text: string, deepest: number): Parsed => {
         skip()
         if (text[at] !== '"') fail('a field name in quotation marks is expected')
         const name = string()
-        expect(':', `after the field name "${shorten(name)}"`)
+        expect(':', `after the field name ${echo(name.slice(0, 100))}`)
         trail.push(name)
         if (Object.hasOwn(value, name)) repeated.push(trail.reduce<string>(join, ''))
         value[name] = any(level + 1)
@@ -113,9 +115,7 @@ export const parseJson = (text: string, deepest: number): Parsed => {
     }
     const named = { true: true, false: false, null: null }[word]
     if (named === undefined)
-      return fail(
-        word === '' ? 'a value is expected' : `"${shorten(word)}" is no JSON value; texts need quotation marks`,
-      )
+      return fail(word === '' ? 'a value is expected' : `${echo(word)} is no JSON value; texts need quotation marks`)
     at += word.length
     return named
   }
@@ -140,9 +140,6 @@ export const join = (path: string, step: string | number): string => {
   return path === '' ? step : `${path}.${step}`
 }
 
-/** A text cut to what a message can hold. */
-export const shorten = (text: string): string => (text.length <= 60 ? text : `${text.slice(0, 57)}...`)
-
 /** No number needs a thousand digits; a longer run of them is no JSON value here. */
 const takeWord = (text: string, at: number): string => {
   const word = /^[-+\w.]*/.exec(text.slice(at, at + 1001))?.[0] ?? ''
@@ -150,7 +147,7 @@ const takeWord = (text: string, at: number): string => {
 }
 
 const sample = (text: string, at: number): string =>
-  at >= text.length ? 'the end of the file' : shorten(text.slice(at, at + 100).split(/[\r\n]/)[0] ?? '')
+  at >= text.length ? 'the end of the file' : echo(text.slice(at, at + 100).split(/[\r\n]/)[0] ?? '')
 
 const place = (text: string, at: number): string => {
   if (text.trim() === '' || text === '\uFEFF') return ''

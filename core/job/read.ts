@@ -1,5 +1,6 @@
 /** A job file's text to a job: read, validated, completed with its defaults; or everything that is wrong with it. */
 import type { Catalogue } from '../catalogue/types.ts'
+import { echo } from '../quantity/signs.ts'
 import { complete } from './complete.ts'
 import { fingerprint } from './fingerprint.ts'
 import { parseJson, type JsonObject } from './json.ts'
@@ -28,7 +29,8 @@ export const readJob = (text: string, catalogue: Catalogue): JobRead => {
     return refused(`${text.length} characters`, `a job file has at most ${MOST_CHARACTERS} characters`)
   const parsed = parseJson(text, DEEPEST)
   if (!parsed.ok) return refused(parsed.read, `not a job file in JSON: ${parsed.message}`)
-  if (!isObject(parsed.value)) return refused(text.trim().slice(0, 40), 'a job file holds one object, between { and }')
+  if (!isObject(parsed.value))
+    return refused(echo(text.trim().slice(0, 100)), 'a job file holds one object, between { and }')
   const foreign = foreignFile(parsed.value)
   if (foreign) return { ok: false, findings: [foreign] }
   const entered = upgraded(parsed.value)
@@ -36,7 +38,7 @@ export const readJob = (text: string, catalogue: Catalogue): JobRead => {
   const walked = walk(entered, catalogue)
   for (const path of parsed.repeated) {
     walked.findings.delete(path)
-    find(walked, path, 'the same name twice', 'this field is given twice; leave one of them out')
+    find(walked, path, walked.entered.get(path), 'this field is given twice, last as read here; leave one of them out')
   }
   checkTogether(walked)
   if (walked.findings.size > 0) return { ok: false, findings: [...walked.findings.values()] }
@@ -50,7 +52,7 @@ const foreignFile = ({ format, version }: JsonObject): Finding | undefined => {
   if (typeof format === 'string' && format !== 'longtravel-job')
     return {
       path: 'format',
-      read: JSON.stringify(format.slice(0, 60)),
+      read: echo(format.slice(0, 100)),
       message: 'Format: this is no job file; right would be "longtravel-job"',
     }
   if (typeof version === 'number' && version > JOB_VERSION)

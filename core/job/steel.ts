@@ -1,7 +1,7 @@
 /** The steels of a girder: which parts each serves, and its strengths at the greatest thickness among those. */
 import type { Metre } from '../quantity/kinds.ts'
 import type { SteelEntry } from './types.ts'
-import { find, seen, type Walked } from './walk.ts'
+import { findAt, seen, type Walked } from './walk.ts'
 
 export const STEELS = ['girder.steel', 'girder.capSteel', 'girder.plateSteel'] as const
 
@@ -16,7 +16,7 @@ export const steelOf = (walked: Walked, path: SteelPath): SteelEntry | undefined
   const parts = thicknesses(walked)
   const served = parts.filter(({ steel }) => steel === path).map(({ thickness }) => thickness)
   if (path !== 'girder.steel' && parts.length > 0 && served.length === 0) {
-    find(walked, path, '', 'no part of the section is of this steel; leave it out')
+    findAt(walked, path, [], 'no part of the section is of this steel; leave it out')
     return undefined
   }
   if (E === undefined) return undefined
@@ -27,14 +27,10 @@ export const steelOf = (walked: Walked, path: SteelPath): SteelEntry | undefined
     return fy === undefined || fu === undefined ? undefined : { name: 'as entered', fy, fu, E }
   }
   const greatest = Math.max(0, ...served)
-  const step = listed.steps.find(({ upTo }) => upTo === undefined || greatest <= upTo)
+  // "203.2 mm" must not fall beyond a step that ends at 8 in by its last digit.
+  const step = listed.steps.find(({ upTo }) => upTo === undefined || greatest <= upTo * (1 + 1e-9))
   if (step) return { name: listed.name, fy: step.fy, fu: step.fu, E }
-  find(
-    walked,
-    `${path}.name`,
-    listed.name,
-    `Name of the steel: no strength is listed for a thickness of ${greatest * 1000} mm`,
-  )
+  findAt(walked, `${path}.name`, [], `no strength is listed for a thickness of ${Number((greatest * 1000).toPrecision(6))} mm`)
   return undefined
 }
 

@@ -4,8 +4,8 @@ import { readQuantity } from '../quantity/read.ts'
 import { echo } from '../quantity/signs.ts'
 import type { Entry, Field, NumberEntry, QuantityEntry, Way } from './field.ts'
 import { isRefused } from './field.ts'
-import { fieldsBelow, type FieldPath, type FieldValue } from './fields.ts'
-import { join, shorten, type Json, type JsonObject } from './json.ts'
+import { FIELDS, fieldsBelow, type FieldPath, type FieldValue } from './fields.ts'
+import { join, type Json, type JsonObject } from './json.ts'
 import { either, FAMILY_IN_WORDS, inWords, limitsInWords, limitsOf, nearestNames } from './phrases.ts'
 import type { DefaultTaken } from './types.ts'
 
@@ -16,8 +16,9 @@ export interface Finding {
   readonly message: string
 }
 
-/** What a walk collects; keys are paths. Values are SI, an object is `true`, a map its keys. */
+/** What a walk collects; keys are paths. Values are SI, an object is `true`, a map its keys; `entered` is what stood in the file. */
 export interface Walked {
+  readonly entered: Map<string, Json>
   readonly values: Map<string, unknown>
   readonly findings: Map<string, Finding>
   readonly defaults: Map<string, DefaultTaken>
@@ -27,7 +28,7 @@ export interface Walked {
 const MOST_FINDINGS = 500
 
 export const walk = (job: JsonObject, catalogue: Catalogue): Walked => {
-  const walked: Walked = { values: new Map(), findings: new Map(), defaults: new Map() }
+  const walked: Walked = { entered: new Map(), values: new Map(), findings: new Map(), defaults: new Map() }
   readObject({ walked, catalogue }, job, '', '', undefined)
   return walked
 }
@@ -37,7 +38,7 @@ export const find = ({ findings }: Walked, path: string, read: Json | undefined,
   if (findings.has(path) || findings.size > MOST_FINDINGS) return
   if (findings.size < MOST_FINDINGS)
     findings.set(path, {
-      path: path.length > 200 ? `${path.slice(0, 197)}...` : path,
+      path: cut(path.replace(UNPRINTABLE, '?'), 200),
       read: readInWords(read),
       message,
     })
@@ -47,6 +48,12 @@ export const find = ({ findings }: Walked, path: string, read: Json | undefined,
       read: '',
       message: `more than ${MOST_FINDINGS} entries are wrong; the rest is not listed`,
     })
+}
+
+/** Notes a finding at a path of the dictionary, with the field's name and what was entered there. */
+export const findAt = (walked: Walked, path: FieldPath, at: readonly (number | string)[], message: string): void => {
+  const here = placed(path, at)
+  find(walked, here, walked.entered.get(here), `${FIELDS[path].name}: ${message}`)
 }
 
 /** The value at a path of the dictionary; `at` fills its `[]` and `{…}` in order. Undefined where it was left out or is wrong. */
@@ -94,11 +101,23 @@ const readObject = (
     const fieldPath = join(path, key)
     const value = json[key]
     if (value !== undefined) {
+      walked.entered.set(fieldPath, value)
       if (way === undefined || !ofOtherWays.has(key)) readField(tools, field, value, fieldPattern, fieldPath)
     } else if (way?.needs.includes(key) || (field.required === true && !ofOtherWays.has(key)))
-      find(walked, fieldPath, undefined, `${field.name} is required: ${inWords(field.entry)}`)
+      find(
+        walked,
+        fieldPath,
+        undefined,
+        `${field.name} is required: ${inWords(field.entry)}${needsBelow(fieldPattern)}`,
+      )
     else if (!ofOtherWays.has(key)) takeDefault(tools, field, fieldPattern, fieldPath)
   }
+}
+
+/** What an object needs, for the message where the whole object is missing. */
+const needsBelow = (pattern: string): string => {
+  const needed = [...fieldsBelow(pattern)].filter(([, { field }]) => field.required === true).map(([key]) => key)
+  return needed.length > 0 ? ` with ${needed.join(', ')}` : ''
 }
 
 const takeDefault = (tools: Tools, field: Field, pattern: string, path: string): void => {
@@ -249,9 +268,9 @@ const unknownField = (key: string, names: readonly string[]): string => {
 
 const readInWords = (json: Json | undefined): string => {
   if (json === undefined) return 'nothing'
-  if (Array.isArray(json)) return json.length <= 12 ? shorten(JSON.stringify(json)) : `a list of ${json.length} values`
+  if (Array.isArray(json)) return json.length <= 12 ? cut(JSON.stringify(json), 60) : `a list of ${json.length} values`
   if (isObject(json)) return `an object with ${Object.keys(json).length} fields`
-  if (typeof json === 'string') return echo(json)
+  if (typeof json === 'string') return echo(json.slice(0, 200))
   return typeof json === 'number' ? String(json) : JSON.stringify(json)
 }
 
@@ -259,3 +278,8 @@ const defaultInWords = (entry: Json | undefined): string => {
   if (Array.isArray(entry)) return entry.join(', ')
   return typeof entry === 'string' ? entry : JSON.stringify(entry)
 }
+
+const cut = (text: string, most: number): string => (text.length <= most ? text : `${text.slice(0, most - 3)}...`)
+
+/** Signs that would disturb the line a path is printed in: controls, and marks that turn the direction of writing. */
+const UNPRINTABLE = /[^\p{L}\p{M}\p{N}\p{P}\p{S} ]/gu

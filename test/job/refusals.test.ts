@@ -156,7 +156,7 @@ const cases: readonly (readonly [what: string, draft: () => Draft, path: string,
     'a set with an unknown crane',
     put(['basis', 'cranesTogether'], [{ East: {} }], rolledInFull),
     'basis.cranesTogether[0].East',
-    /the cranes are "North", "South crane"/,
+    /the cranes are “North”, “South crane”/,
   ],
   [
     'a set with an index too far',
@@ -330,8 +330,8 @@ describe('files that cannot be read', () => {
     expect(only(' \n\uFEFF')).not.toMatch(/NaN/)
     expect(only('\uFEFF')).toMatch(/the file is empty/)
     expect(only('%PDF-1.7')).toMatch(/line 1, column 1/)
-    expect(only('{\n  "format": longtravel\n}')).toMatch(/line 2, column 13: "longtravel" is no JSON value/)
-    expect(only('{"units": NaN}')).toMatch(/"NaN" is no JSON value/)
+    expect(only('{\n  "format": longtravel\n}')).toMatch(/line 2, column 13: “longtravel” is no JSON value/)
+    expect(only('{"units": NaN}')).toMatch(/“NaN” is no JSON value/)
     expect(only('[1, 2]')).toMatch(/one object/)
     expect(only('"job"')).toMatch(/one object/)
     expect(only('['.repeat(100_000))).toMatch(/nested deeper than 32 levels/)

@@ -23,7 +23,7 @@ export const evidenceTable = (results: readonly EvidenceResult[]): string => {
     within ? 'within' : 'OUTSIDE',
     writeNumber(printed, 12),
     writeNumber(computed, 7),
-    writeNumber(difference, 2),
+    differenceText(difference, printed),
     writeNumber(tolerance, 3),
     unit,
     what,
@@ -38,6 +38,10 @@ export const evidenceTable = (results: readonly EvidenceResult[]): string => {
     `Outside checks: ${results.length}, ${verdict}`,
   ].join('\n')}\n`
 }
+
+/** What the arithmetic rounds off is no difference. */
+const differenceText = (difference: number, printed: number): string =>
+  Math.abs(difference) <= 1e-12 * Math.abs(printed) ? '0' : writeNumber(difference, 2)
 
 const sourceOf = ({ id, source, known, why }: EvidenceResult): readonly string[] =>
   wrap(`${id}: ${source} (${known})${why === undefined ? '' : `; ${why}`}`, 4)

@@ -11,8 +11,6 @@ export const EXIT = {
   open: 4,
 } as const
 
-export type Exit = (typeof EXIT)[keyof typeof EXIT]
-
 /** Where the command reads and writes: the process in use, texts in the tests. */
 export interface Io {
   readonly stdin: () => AsyncIterable<Uint8Array>

@@ -6,12 +6,12 @@ import { SI_UNIT } from '../quantity/unit-names.ts'
 import { citation } from '../sources/clause.ts'
 import type { Extreme } from '../travel/types.ts'
 
-export interface ResultQuantity {
+interface ResultQuantity {
   readonly value: number
   readonly unit: string
 }
 
-export interface ResultExtreme {
+interface ResultExtreme {
   readonly value: number
   readonly span: number
   readonly station: number
@@ -24,7 +24,7 @@ export interface ResultExtreme {
   readonly with: { readonly moment: number; readonly shear: number }
 }
 
-export interface ResultPlace {
+interface ResultPlace {
   readonly status: Status
   readonly why: string | null
   readonly ok: boolean | null
@@ -36,7 +36,7 @@ export interface ResultPlace {
   readonly set: string | null
 }
 
-export interface ResultCheck extends ResultPlace {
+interface ResultCheck extends ResultPlace {
   readonly id: string
   readonly title: string
   readonly clause: string

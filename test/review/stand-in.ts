@@ -65,7 +65,7 @@ export const open: Check = {
   places: [],
 }
 
-export const idle: Check = {
+const idle: Check = {
   id: 'us.bearing-stiffener',
   title: 'Bearing stiffeners',
   clause: { document: 'AISC 360-22', clause: 'J10.8' },

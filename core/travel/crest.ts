@@ -74,7 +74,7 @@ export const readCrests = (row: Row, term: TermLoads, lead: number, into: Crests
     const before = V - q * reach
     if (V >= 0 && before < 0) {
       const top = x + V / q
-      add(M + (V * V) / (2 * q), top, passed - (moving * top) / L, (moving * moving) / (L * L * q))
+      add(M + (V / q) * (V / 2), top, passed - (moving * top) / L, ((moving / L) * (moving / L)) / q)
     }
     M += (V - (q * reach) / 2) * reach
     V = before - weights[i]!
@@ -88,7 +88,7 @@ export const readCrests = (row: Row, term: TermLoads, lead: number, into: Crests
   const last = V - q * (L - x)
   if (V >= 0 && last < 0) {
     const top = x + V / q
-    add(M + (V * V) / (2 * q), top, passed - (moving * top) / L, (moving * moving) / (L * L * q))
+    add(M + (V / q) * (V / 2), top, passed - (moving * top) / L, ((moving / L) * (moving / L)) / q)
   }
   if (last >= 0) add(right, L, 0, 0)
   into.count = n

@@ -6,7 +6,8 @@
  * iteration. That root lies within 0.423 L and 0.577 L, where it does for every single load (a load at the very support
  * bends the girder most at L / sqrt 3), so also for their sum. As the wheels move, the greatest deflection
  * changes by the change at that station (the station's own movement adds nothing): the root of that derivative is bracketed
- * between the places where a wheel comes on or leaves, in PARTS parts each, and closed in on to 1e-12 of the span.
+ * between the places where a wheel comes on or leaves, in PARTS parts each, and closed in on to 1e-12 of the span. Where
+ * both ends of such an interval lie too far below what is known for the steepest rise, it is left out.
  */
 import { EQUAL } from './passage.ts'
 
@@ -26,21 +27,23 @@ export const greatestDeflection = (
   forces: Float64Array,
   stiffness: number,
 ): Deflected => {
-  let best: Deflected = { value: 0, lead: offsets.length > 0 ? -offsets.at(-1)! - length : 0, at: length / 2 }
   const curve = makeCurve(length, offsets, forces, stiffness)
   const events = Float64Array.from(
-    [...offsets].flatMap((offset) => [-offset, length - offset]),
-    (lead) => lead,
+    [...offsets, ...offsets].map((offset, i) => (i < offsets.length ? 0 : length) - offset),
   ).sort()
+  const values = events.map((lead) => curve(lead).value)
+  const known = values.reduce((a, b) => Math.max(a, b), 0)
+  let best: Deflected = { value: 0, lead: offsets.length > 0 ? events.at(-1)! + length : 0, at: length / 2 }
   const read = (lead: number): number => {
     const { value, change, at } = curve(lead)
     if (value > best.value + EQUAL * best.value) best = { value, lead, at }
     return change
   }
-  for (let e = 0; e + 1 < events.length; e++) {
+  for (let e = events.length - 2; e >= 0; e--) {
     const from = events[e]!
     const reach = events[e + 1]! - from
     if (!(reach > 1e-12 * length)) continue
+    if ((values[e]! + values[e + 1]! + reach * steepest(from + reach / 2)) / 2 < known * (1 - EQUAL)) continue
     // Just within the interval, so that the wheels on the girder are those of the interval.
     let a = from + 1e-13 * length
     let rising = read(a) > 0
@@ -53,6 +56,14 @@ export const greatestDeflection = (
     }
   }
   return best
+
+  /** No deflection line is steeper than the greatest end slope under one load, L^2 / (9 sqrt 3 E I). */
+  function steepest(lead: number): number {
+    let force = 0
+    for (let i = 0; i < offsets.length; i++)
+      if (offsets[i]! + lead >= 0 && offsets[i]! + lead <= length) force += forces[i]!
+    return (force * length * length) / (9 * Math.sqrt(3) * stiffness)
+  }
 }
 
 /** Root of a function that is positive at a and not at b: Illinois steps, halving where they crawl. */

@@ -23,8 +23,8 @@ type Of<Kind extends Effect['kind']> = Extract<Effect, { kind: Kind }>
  * The worst value of an effect over every position of the train on its span, with its place. Exact for what is linear in
  * the wheels; `method` says 'refined' where the place was closed in on to 1e-9 of the span.
  *
- * Wheels at a support count as on the span. Of equally bad places the first is given: the train as listed before mirrored,
- * then the smallest lead. Cranes of a train stand bumper to bumper; where that is not certain to be the worst
+ * Wheels at a support count as on the span. Of equally bad places one is given: the train as listed before mirrored, then
+ * the greatest lead (of a train that is the same either way: the section left of midspan). Cranes of a train stand bumper to bumper; where that is not certain to be the worst
  * (apart.ts) they are also driven with free gaps. Other cranes being away is another train, to be asked for itself.
  *
  * Throws RangeError where the effect does not fit the train (number of wheels, negative factor of a 'worst' moment, a factor of a 'same' one, negative

@@ -13,7 +13,7 @@ export interface Passed {
 
 /**
  * Extremes of the sum of weights[i] times the line at lead + offsets[i] over every lead, the train off the line (0) included.
- * Of equal extremes the one with the smallest lead. Offsets in m, ascending.
+ * Of equal extremes the one with the greatest lead. Offsets in m, ascending.
  */
 export const passLine = (
   line: Influence,
@@ -27,7 +27,7 @@ export const passLine = (
   events.sort()
 
   // Off the line, clear of it by its own length: a place that nobody can take for a wheel at its end.
-  const off = { value: 0, lead: events.length > 0 ? events[0]! - (breaks.at(-1)! - breaks[0]!) : 0 }
+  const off = { value: 0, lead: events.length > 0 ? events.at(-1)! + breaks.at(-1)! - breaks[0]! : 0 }
   let max: Passed = off
   let min: Passed = off
   const read = (value: number, lead: number): void => {
@@ -35,7 +35,7 @@ export const passLine = (
     if (value < min.value - EQUAL * Math.abs(min.value)) min = { value, lead }
   }
 
-  for (let e = 0; e + 1 < events.length; e++) {
+  for (let e = events.length - 2; e >= 0; e--) {
     const from = events[e]!
     const reach = events[e + 1]! - from
     if (!(reach > 0)) continue
@@ -57,10 +57,10 @@ export const passLine = (
       d += w * cubic[3]
     }
     const at = (t: number): number => a + t * (b + t * (c + t * d))
-    read(a, from)
+    read(at(reach), from + reach)
     if (c !== 0 || d !== 0)
       for (const root of quadraticRoots(3 * d, 2 * c, b)) if (root > 0 && root < reach) read(at(root), from + root)
-    read(at(reach), from + reach)
+    read(a, from)
   }
   return { max, min }
 }
@@ -68,12 +68,12 @@ export const passLine = (
 /** Values nearer than this part are equal: of mirror images the first stays, whatever the rounding. */
 export const EQUAL = 1e-13
 
-/** Real roots of a t^2 + b t + c, ascending, without cancellation. */
+/** Real roots of a t^2 + b t + c, descending, without cancellation. */
 const quadraticRoots = (a: number, b: number, c: number): readonly number[] => {
   if (a === 0) return b === 0 ? [] : [-c / b]
   const root = b * b - 4 * a * c
   if (root < 0) return []
   const q = -(b + (b < 0 ? -1 : 1) * Math.sqrt(root)) / 2
   const pair = q === 0 ? [0] : [q / a, c / q]
-  return pair.sort((x, y) => x - y)
+  return pair.sort((x, y) => y - x)
 }

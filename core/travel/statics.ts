@@ -56,13 +56,13 @@ export const proveEquilibrium = (standing: Standing, x: number): void => {
     loads.reduce((sum, load) => sum + load.force * Math.max(load.x - x, 0), 0)
   const vertical = Math.abs(support.left + support.right - total)
   const bending = Math.abs(momentAt(standing, x) - fromRight)
-  if (vertical * L <= CLOSED * moments && bending <= CLOSED * moments) return
+  if (vertical * L <= CLOSED * moments + NOTHING && bending <= CLOSED * moments + NOTHING) return
   throw equilibriumError(`girder of ${L} m at ${x} m: reactions are off by ${vertical} N, the moment by ${bending} N m`)
 }
 
 /** Throws an EquilibriumError unless the value found is the one plain statics gives; `size` is that of its addends. */
 export const proveValue = (found: number, statics: number, size: number): void => {
-  if (Math.abs(found - statics) <= CLOSED * size) return
+  if (Math.abs(found - statics) <= CLOSED * size + NOTHING) return
   throw equilibriumError(`the search found ${found}, plain statics at that place gives ${statics}`)
 }
 
@@ -74,3 +74,6 @@ const equilibriumError = (message: string): Error => {
 
 /** What rounding may leave open, as a part of the loads. */
 const CLOSED = 1e-9
+
+/** Below this a number has lost digits to underflow; no load is as small. */
+const NOTHING = 1e-290

@@ -9,6 +9,9 @@
  * has several crests: the sum of maxima is then the greatest of the sums over every choice of crests, and a place where two
  * choices are equal bends the wrong way to be a maximum, so the vertices of all choices are enough.
  * Every candidate is evaluated as it is, so none can be reported greater than it is.
+ *
+ * No moment changes faster with s than the moving wheels on the girder weigh together (an influence line is nowhere steeper
+ * than 1), so an interval whose ends lie too far below what is already known is left out.
  */
 import { crestChanges, makeCrests, readCrests, type Crests, type Row, type TermLoads } from './crest.ts'
 import { EQUAL } from './passage.ts'
@@ -23,37 +26,53 @@ export interface Swept {
   readonly lead: number
 }
 
-/** The greatest sum for a lead within [low, high]; of equal ones the smallest lead. */
+/** The greatest sum for a lead within [low, high]; of equal ones the greatest lead. */
 export const sweep = (row: Row, terms: readonly SweepTerm[], low = -Infinity, high = Infinity): Swept => {
   const events = eventsOf(row, terms, low, high)
   const work = new Float64Array(terms.length * (2 * row.offsets.length + 2) + 2)
   const crests = terms.map(() => makeCrests(row.offsets.length))
-  let lead = events[0]!
-  let value = valueAt(row, terms, lead, crests)
-  const read = (s: number): void => {
-    const sum = valueAt(row, terms, s, crests)
+  const values = events.map((s) => valueAt(row, terms, s, crests))
+  const known = values.reduce((a, b) => Math.max(a, b))
+  let lead = events.at(-1)!
+  let value = values.at(-1)!
+  const keep = (s: number, sum: number): void => {
     if (!(sum > value + EQUAL * Math.abs(value))) return
     value = sum
     lead = s
   }
+  const read = (s: number): void => {
+    keep(s, valueAt(row, terms, s, crests))
+  }
 
-  for (let e = 0; e + 1 < events.length; e++) {
+  for (let e = events.length - 2; e >= 0; e--) {
     const from = events[e]!
     const to = events[e + 1]!
-    if (!(to > from)) continue
-    work[0] = from
-    let count = 1
-    for (const term of terms) if (term.at === undefined) count = crestChanges(row, term, from, to, work, count)
-    work[count++] = to
-    insertionSort(work, count)
-    for (let k = 0; k + 1 < count; k++) {
-      const a = work[k]!
-      const b = work[k + 1]!
-      readVertices(row, terms, a, b, crests, read)
-      read(b)
+    const rise = ((to - from) * steepest(row, terms, (from + to) / 2)) / 2
+    if (to > from && (values[e]! + values[e + 1]!) / 2 + rise >= known - EQUAL * Math.abs(known)) {
+      work[0] = from
+      let count = 1
+      for (const term of terms) if (term.at === undefined) count = crestChanges(row, term, from, to, work, count)
+      work[count++] = to
+      insertionSort(work, count)
+      for (let k = count - 2; k >= 0; k--) {
+        readVertices(row, terms, work[k]!, work[k + 1]!, crests, read)
+        if (k > 0) read(work[k]!)
+      }
     }
+    keep(from, values[e]!)
   }
   return { value, lead }
+}
+
+/** Bound of the sum's derivative by the lead while the wheels on the girder are those at `lead`. */
+const steepest = ({ length: L, offsets, moves }: Row, terms: readonly SweepTerm[], lead: number): number => {
+  let bound = 0
+  for (let i = 0; i < offsets.length; i++) {
+    const p = offsets[i]! + lead
+    if (moves[i]! === 1 && p >= 0 && p <= L)
+      for (const { factor, weights } of terms) bound += Math.abs(factor * weights[i]!)
+  }
+  return bound
 }
 
 /** Value of the sum with the train at `lead`. */

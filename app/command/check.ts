@@ -1,9 +1,9 @@
 /** `longtravel check`: a job file in, a table of checks and the files asked for out. */
 import { join } from 'node:path'
 import { catalogue } from '../../core/catalogue/load.ts'
-import { readJob, type Finding } from '../../core/job/read.ts'
+import type { Finding } from '../../core/job/read.ts'
 import { resultOf, type Result } from '../../core/review/result.ts'
-import { review } from '../../core/review/review.ts'
+import { reviewText } from '../../core/review/review-text.ts'
 import type { Review } from '../../core/review/types.ts'
 import { checksCsv, envelopeCsv } from './csv.ts'
 import { EXIT, type Io } from './exit.ts'
@@ -18,11 +18,10 @@ export type Outcome =
 
 /** A job's text reviewed; no file is touched. `name` is what messages call the text. What is thrown is a fault of the program. */
 export const checkText = (text: string, name = 'job'): Outcome => {
-  const read = readJob(text, catalogue)
-  if (!read.ok) return { exit: EXIT.input, messages: read.findings.map((finding) => messageOf(finding, name)) }
-  const judged = review(read.job)
-  const reviewed = { ...judged, cautions: [...read.cautions, ...judged.cautions] }
-  return { exit: exitOf(reviewed), review: reviewed, result: resultOf(reviewed) }
+  const reviewed = reviewText(text, catalogue)
+  if (!reviewed.ok) return { exit: EXIT.input, messages: reviewed.findings.map((finding) => messageOf(finding, name)) }
+  const { review } = reviewed
+  return { exit: exitOf(review), review, result: resultOf(review) }
 }
 
 export interface CheckOptions {

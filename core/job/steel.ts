@@ -30,7 +30,12 @@ export const steelOf = (walked: Walked, path: SteelPath): SteelEntry | undefined
   // "203.2 mm" must not fall beyond a step that ends at 8 in by its last digit.
   const step = listed.steps.find(({ upTo }) => upTo === undefined || greatest <= upTo * (1 + 1e-9))
   if (step) return { name: listed.name, fy: step.fy, fu: step.fu, E }
-  findAt(walked, `${path}.name`, [], `no strength is listed for a thickness of ${Number((greatest * 1000).toPrecision(6))} mm`)
+  findAt(
+    walked,
+    `${path}.name`,
+    [],
+    `no strength is listed for a thickness of ${Number((greatest * 1000).toPrecision(6))} mm`,
+  )
   return undefined
 }
 

@@ -2,8 +2,15 @@
 import type { Catalogue } from '../catalogue/types.ts'
 import { readQuantity } from '../quantity/read.ts'
 import { echo } from '../quantity/signs.ts'
-import type { Entry, Field, NumberEntry, QuantityEntry, Way } from './field.ts'
-import { isRefused } from './field.ts'
+import {
+  isRefused,
+  type Entry,
+  type Family,
+  type Field,
+  type NumberEntry,
+  type QuantityEntry,
+  type Way,
+} from './field.ts'
 import { FIELDS, fieldsBelow, type FieldPath, type FieldValue } from './fields.ts'
 import { join, type Json, type JsonObject } from './json.ts'
 import { either, FAMILY_IN_WORDS, inWords, limitsInWords, limitsOf, nearestNames } from './phrases.ts'
@@ -185,7 +192,7 @@ const readEntry = (tools: Tools, field: Field, entry: Entry, json: Json, pattern
       const near = catalogue.nearest(entry.family, json.slice(0, 60))
       return wrong(
         `the catalogue of this version has no such name for ${FAMILY_IN_WORDS[entry.family]}` +
-          (near.length > 0 ? `; nearest: ${near.join(', ')}` : ''),
+          (near.length > 0 ? `; nearest: ${near.join(', ')}` : `; it has ${held(catalogue, entry.family)}`),
       )
     }
     case 'list': {
@@ -219,6 +226,14 @@ const readEntry = (tools: Tools, field: Field, entry: Entry, json: Json, pattern
       return true
     }
   }
+}
+
+/** What the catalogue has of a kind, where no name is near: the families of shapes, the names of rails and steels. */
+const held = (catalogue: Catalogue, family: Family): string => {
+  const families = { iShape: catalogue.iShapes, channel: catalogue.channels }
+  if (family === 'rail') return catalogue.rails.map(({ name }) => name).join(', ')
+  if (family === 'steel') return catalogue.steels.map(({ name }) => name).join(', ')
+  return `the families ${[...new Set(families[family].map((shape) => shape.family))].join(', ')}`
 }
 
 const FORBIDDEN = new Set(['__proto__', 'constructor', 'prototype'])

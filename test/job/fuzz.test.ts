@@ -72,8 +72,10 @@ const change = fc.record({
 
 const mutate = (
   job: Draft,
-  { where, how, key, value }: { where: number; how: string; key: string; value: Json },
+  { where, how, key, value: shared }: { where: number; how: string; key: string; value: Json },
 ): void => {
+  // The value may be one of the list above, and a further change may reach into it.
+  const value = structuredClone(shared)
   const all: [parent: Draft, key: string][] = []
   const gather = (parent: Draft) => {
     for (const [name, child] of Object.entries(parent)) {

@@ -2,7 +2,7 @@
 import type { WheelTrain } from '../crane/types.ts'
 import { as, type Metre, type Newton, type NewtonMetre, type NewtonSquareMetre } from '../quantity/kinds.ts'
 import { drive } from './drive.ts'
-import { momentLine, shearLine, spanOf } from './influence.ts'
+import { momentLine, shearLine, spanOf, type Influence } from './influence.ts'
 import { passLine } from './passage.ts'
 import { inOrder, waysOf } from './place.ts'
 import type { Beam, Effect, Extreme, Side } from './types.ts'
@@ -106,16 +106,20 @@ export const envelopeCurve = (
       ),
     })),
   )
+  const heaviest = Math.max(0, ...rows.map(({ loads }) => loads.reduce((sum, load) => sum + load, 0)))
+  const { length } = spanOf(beam, span)
   return stations.map((station) => {
-    const extremes = (line: ReturnType<typeof momentLine>) => {
+    // Rounding at the ends of a line is not an effect of its own.
+    const read = (value: number, size: number): number => (Math.abs(value) < 1e-13 * size ? 0 : value)
+    const extremes = (line: Influence, size: number) => {
       const passed = rows.map(({ offsets, loads }) => passLine(line, offsets, loads))
       return {
-        max: Math.max(0, ...passed.map(({ max }) => max.value)),
-        min: Math.min(0, ...passed.map(({ min }) => min.value)),
+        max: read(Math.max(0, ...passed.map(({ max }) => max.value)), size),
+        min: read(Math.min(0, ...passed.map(({ min }) => min.value)), size),
       }
     }
-    const moment = extremes(momentLine(beam, span, station))
-    const shear = extremes(shearLine(beam, span, station))
+    const moment = extremes(momentLine(beam, span, station), heaviest * length)
+    const shear = extremes(shearLine(beam, span, station), heaviest)
     return {
       station,
       moment: { max: as('moment', moment.max), min: as('moment', moment.min) },

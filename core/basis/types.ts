@@ -1,5 +1,5 @@
 /** What a set of rules hands to the drive, and what comes back as a check. */
-import type { Working } from '../formula/working.ts'
+import type { WorkingRecorder } from '../formula/working.ts'
 import type { Clause } from '../sources/clause.ts'
 import type { Quantity } from '../quantity/kinds.ts'
 import type { Effect, Extreme } from '../travel/types.ts'
@@ -18,7 +18,6 @@ export interface Judgement {
   readonly demand: Quantity
   readonly resistance: Quantity
   readonly utilisation: number
-  readonly working: Working
 }
 
 /** An effect to be made worst, and the judge who decides at that place. */
@@ -29,14 +28,15 @@ export interface Ask extends Subject {
   readonly combination: string
   readonly set: string
   readonly effect: Effect
-  readonly judge: (worst: Extreme) => Judgement
+  /** Writes its derivation to `on` as it goes. */
+  readonly judge: (worst: Extreme, on: WorkingRecorder) => Judgement
 }
 
 /** An answer that needs no wheels: a proportion, or a subject that does not apply or is not covered, with the reason. */
 export interface Verdict extends Subject {
   readonly status: Status
   readonly why: string
-  readonly judgement?: Judgement
+  readonly judge?: (on: WorkingRecorder) => Judgement
 }
 
 export interface Plan {

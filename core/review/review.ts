@@ -5,6 +5,7 @@ import { designOf, type Design } from '../basis/us/design.ts'
 import { plan } from '../basis/us/plan.ts'
 import { wheelTrains } from '../crane/trains.ts'
 import { wheelLoads } from '../crane/wheels.ts'
+import { unrecorded, working, type Working, type WorkingRecorder } from '../formula/working.ts'
 import type { Job } from '../job/types.ts'
 import { as } from '../quantity/kinds.ts'
 import { sectionOf } from '../section/properties.ts'
@@ -64,8 +65,16 @@ export function review(job: Job): Review {
 function place(ask: Ask, beam: Beam, { trains, job }: Design): Place {
   const { span, train, combination, set } = ask
   const at = drive({ beam, span, trains, train, eitherWay: job.runway.eitherWay }, ask.effect)
-  const judgement = ask.judge(at)
-  return { status: judgement.utilisation <= 1 ? 'holds' : 'fails', ...judgement, at, combination, set }
+  const judgement = ask.judge(at, unrecorded)
+  const status = judgement.utilisation <= 1 ? 'holds' : 'fails'
+  return { status, ...judgement, at, combination, set, working: written((on) => ask.judge(at, on)) }
+}
+
+/** A derivation that is made when it is asked for. */
+const written = (decide: (on: WorkingRecorder) => unknown) => (): Working => {
+  const on = working()
+  decide(on)
+  return on
 }
 
 /** One check a subject: its worst place leads, the others follow. In the order in which the rules name the subjects. */
@@ -78,8 +87,9 @@ function checksOf(verdicts: readonly Verdict[], asks: readonly Ask[], judge: (as
   }
   for (const ask of asks) enter(ask, judge(ask))
   for (const verdict of verdicts) {
-    const { status, why, judgement } = verdict
-    enter(verdict, { status, ...(why === '' ? {} : { why }), ...judgement })
+    const { status, why, judge: decide } = verdict
+    const judged = decide && { ...decide(unrecorded), working: written(decide) }
+    enter(verdict, { status, ...(why === '' ? {} : { why }), ...judged })
   }
   return [...subjects.values()].map(({ subject, places }) => {
     const [worst, ...others] = places.sort(worseFirst) as [Place, ...Place[]]

@@ -19,7 +19,8 @@ export interface Place {
   readonly at?: Extreme
   readonly combination?: string
   readonly set?: string
-  readonly working?: Working
+  /** The derivation, made when it is to be shown. */
+  readonly working?: () => Working
 }
 
 /** The worst place of one subject; the others, worst first, stand under `places`. */

@@ -3,7 +3,7 @@ import { chapter } from '../../formula/chapter.ts'
 import { working, type Working, type WorkingRecorder } from '../../formula/working.ts'
 import { as, type Metre, type Newton, type Pascal, type SquareMetre } from '../../quantity/kinds.ts'
 import type { Section } from '../../section/types.ts'
-import { availableForce } from './available.ts'
+import { available } from './available.ts'
 import type { Steel } from './flexure.ts'
 import { BUILT_UP_FLANGE_SLENDER, COVER_SLENDER, K_C, ROLLED_FLANGE_SLENDER, WEB_SLENDER } from './slenderness.ts'
 
@@ -13,10 +13,30 @@ const E4 = chapter('AISC 360-22', 'E4')
 const E7 = chapter('AISC 360-22', 'E7')
 
 /** phi_c P_n or P_n / Omega_c. */
-export const availableCompression = availableForce(E1, 'E1', { phi: 0.9, Omega: 1.67 })
+export const availableCompression = available(E1, 'E1', {
+  kind: 'force',
+  strength: 'P',
+  subscript: 'c',
+  phi: 0.9,
+  Omega: 1.67,
+})
 
-const EULER = { E: 'stress', L_c: 'distance', r: 'length' } as const
-const E3_4 = E3.formula('E3-4', { gives: ['F_e', 'stress'], where: EULER, text: 'pi^2*E/(L_c/r)^2' })
+const E3_4X = E3.formula('E3-4', {
+  gives: ['F_ex', 'stress'],
+  where: { E: 'stress', L_cx: 'distance', r_x: 'length' },
+  text: 'pi^2*E/(L_cx/r_x)^2',
+})
+const E3_4Y = E3.formula('E3-4', {
+  gives: ['F_ey', 'stress'],
+  where: { E: 'stress', L_cy: 'distance', r_y: 'length' },
+  text: 'pi^2*E/(L_cy/r_y)^2',
+})
+const LOWER = E3.formula('E3', {
+  gives: ['F_e', 'stress'],
+  where: { F_ex: 'stress', F_ey: 'stress' },
+  text: 'min(F_ex, F_ey)',
+  note: 'F_ey sideways, with twist where the girder has one axis of symmetry',
+})
 const FEY = E4.formula('E4-6', {
   gives: ['F_ey', 'stress'],
   where: { E: 'stress', L_cy: 'distance', r_y: 'length' },
@@ -42,7 +62,6 @@ const E4_3 = E4.formula('E4-3', {
   where: { F_ey: 'stress', F_ez: 'stress', H: 'ratio' },
   text: '(F_ey + F_ez)/(2*H)*(1 - sqrt(1 - 4*F_ey*F_ez*H/(F_ey + F_ez)^2))',
 })
-/** Text of the exponent: 0.658^(F_y/F_e). */
 const E3_2 = E3.formula('E3-2', {
   gives: ['F_n', 'stress'],
   where: { F_y: 'stress', F_e: 'stress' },
@@ -88,17 +107,17 @@ export function compressiveStrength(section: Section, steel: Steel, L_x: Metre, 
   const { E, F_y } = steel
   on.given('L_cx', 'distance', L_x, 'between the brackets')
   on.given('L_cy', 'distance', L_y, 'between points braced sideways, and against twist')
-  const aboutX = on.take(E3_4, { E, L_c: L_x, r: section.rx })
-  const aboutY = section.doublySymmetric
-    ? on.take(E3_4, { E, L_c: L_y, r: section.ry })
+  const F_ex = on.take(E3_4X, { E, L_cx: L_x, r_x: section.rx })
+  const F_ey = section.doublySymmetric
+    ? on.take(E3_4Y, { E, L_cy: L_y, r_y: section.ry })
     : flexuralTorsional(section, steel, L_y, on)
-  const F_e = aboutX <= aboutY ? aboutX : aboutY
+  const F_e = on.take(LOWER, { F_ex, F_ey })
   const F_n = on.take(E3_FN, { F_y, F_e })
   const A_e = effectiveArea(section, steel, F_n, on)
   const P_n = on.take(E7_1, { F_n, A_e })
   const elastic = {
-    x: as('force', aboutX * section.A),
-    y: as('force', E3_4.value({ E, L_c: L_y, r: section.ry }) * section.A),
+    x: as('force', F_ex * section.A),
+    y: as('force', E3_4Y.value({ E, L_cy: L_y, r_y: section.ry }) * section.A),
   }
   return { P_n, elastic, working: on }
 }

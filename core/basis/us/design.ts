@@ -1,6 +1,7 @@
 /** What every US check reads: the girder, its loads, and the loadings (cranes together x combination) to be tried. */
 import type { CraneWheels } from '../../crane/wheels.ts'
 import type { WheelTrain } from '../../crane/types.ts'
+import { chapter } from '../../formula/chapter.ts'
 import { working, type Working } from '../../formula/working.ts'
 import type { Job } from '../../job/types.ts'
 import { as, STANDARD_GRAVITY, type Metre, type Newton, type NewtonPerMetre } from '../../quantity/kinds.ts'
@@ -28,6 +29,34 @@ export interface Design {
   readonly loadings: readonly Loading[]
   readonly cautions: readonly string[]
 }
+
+const cranes = chapter('ASCE 7-22', '4.9')
+const WHEEL = cranes.formula('4.9.3', {
+  gives: ['P', 'force'],
+  where: { gamma: 'ratio', v: 'ratio', i: 'ratio', I: 'ratio', P_s: 'force' },
+  text: 'gamma*(v + i*I)*P_s',
+  note: 'heaviest wheel: P_s static, I impact; v and i parts of both that this set of cranes takes, gamma load factor',
+})
+const SPLIT_WHEEL = cranes.formula('4.9.3', {
+  gives: ['P', 'force'],
+  where: {
+    gamma_D: 'ratio',
+    gamma: 'ratio',
+    v: 'ratio',
+    i: 'ratio',
+    I: 'ratio',
+    P_s: 'force',
+    P_D: 'force',
+  },
+  text: 'gamma_D*v*P_D + gamma*(v*(P_s - P_D) + i*I*P_s)',
+  note: 'heaviest wheel: P_D bridge and trolley in the static load P_s, I impact; v and i parts that this set of cranes takes',
+})
+const THRUST = cranes.formula('4.9.4', {
+  gives: ['H', 'force'],
+  where: { gamma: 'ratio', s: 'ratio', H_w: 'force' },
+  text: 'gamma*s*H_w',
+  note: 'its side thrust H_w, part s taken',
+})
 
 /** One combination of one set of cranes with one train on the span; forces factored. */
 export interface Loading {
@@ -138,33 +167,27 @@ const brings = (strong: Together, weak: Together, cranes: readonly number[]): bo
 
 function factored(base: Base, train: WheelTrain, set: Together, { dead, live }: Combination) {
   const { job, section, wheels, forces } = base
-  const split = job.basis.craneDeadFactor === 'split'
   const vertical: number[] = []
   const flanges: FlangeForces[] = []
   const thrust: number[] = []
   let heaviest: Working = { steps: [] }
-  let longitudinal = 0
-  for (const crane of train.cranes)
-    longitudinal += live * set.shares.get(crane)!.longitudinal * forces[crane]!.longitudinal
-
   for (const wheel of train.wheels) {
-    const share = set.shares.get(wheel.crane)!
+    const { vertical: v, impact: i, sideThrust: s } = set.shares.get(wheel.crane)!
+    const { impact: I, sideThrust } = forces[wheel.crane]!
     const on = working()
-    const static_ = wheel.load
-    const relieved = (split && wheels[wheel.crane]!.dead?.[wheel.wheel]) || 0
-    const { impact } = forces[wheel.crane]!
-    const P = as(
-      'force',
-      share.vertical * (live * (static_ - relieved) + dead * relieved) + live * share.impact * impact * static_,
-    )
-    const H = as('force', live * share.sideThrust * forces[wheel.crane]!.sideThrust[wheel.wheel]!)
-    on.given('P', 'force', P, `wheel of ${job.cranes[wheel.crane]!.name} with impact and load factor`)
-    on.given('H', 'force', H, 'its side thrust with load factor')
+    const parts = { gamma: live, v, i, I, P_s: wheel.load }
+    const P_D = job.basis.craneDeadFactor === 'split' ? wheels[wheel.crane]!.dead?.[wheel.wheel] : undefined
+    const P = P_D === undefined ? on.take(WHEEL, parts) : on.take(SPLIT_WHEEL, { ...parts, gamma_D: dead, P_D })
+    const H = on.take(THRUST, { gamma: live, s, H_w: sideThrust[wheel.wheel]! })
     flanges.push(flangeForces(section, { H, P, a: base.railArm, e: base.eccentricity }, on))
     thrust.push(H)
     if (P > Math.max(0, ...vertical)) heaviest = on
     vertical.push(P)
   }
+  const longitudinal = train.cranes.reduce(
+    (sum, crane) => sum + live * set.shares.get(crane)!.longitudinal * forces[crane]!.longitudinal,
+    0,
+  )
   return {
     vertical,
     top: flanges.map((flange) => flange.top),

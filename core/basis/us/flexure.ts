@@ -7,7 +7,7 @@ import { working, type Working, type WorkingRecorder } from '../../formula/worki
 import type { Basis } from '../../job/types.ts'
 import { as, type Metre, type Metre4, type NewtonMetre, type Pascal } from '../../quantity/kinds.ts'
 import type { Section } from '../../section/types.ts'
-import { availableMoment } from './available.ts'
+import { available } from './available.ts'
 import {
   BUILT_UP_FLANGE_NONCOMPACT,
   FLANGE_COMPACT,
@@ -27,7 +27,13 @@ const F3 = chapter('AISC 360-22', 'F3')
 const F4 = chapter('AISC 360-22', 'F4')
 
 /** phi_b M_n or M_n / Omega_b of chapter F. */
-export const availableFlexure = availableMoment(F1, 'F1(a)', { phi: 0.9, Omega: 1.67 })
+export const availableFlexure = available(F1, 'F1(a)', {
+  kind: 'moment',
+  strength: 'M',
+  subscript: 'b',
+  phi: 0.9,
+  Omega: 1.67,
+})
 
 // ---- F2, doubly symmetric, compact
 const F2_1 = F2.formula('F2-1', { gives: ['M_p', 'moment'], where: { F_y: 'stress', Z_x: 'modulus' }, text: 'F_y*Z_x' })

@@ -14,11 +14,17 @@ export function judge<K extends Kind>(
 ): Judgement {
   const [d, r] = [demand, resistance].map((value): Quantity => ({ kind, value })) as [Quantity, Quantity]
   on.compare(left, d, '<=', right, r)
-  return { demand: d, resistance: r, utilisation: demand / resistance, working: on }
+  return { demand: d, resistance: r, utilisation: demand / resistance }
 }
 
 /** An interaction that must not pass 1. */
 export const judgeSum = (on: WorkingRecorder, U: number): Judgement => judge(on, 'ratio', ['U', U], ['U_max', 1])
+
+/** A derivation begins with the combination and the forces of the heaviest wheel. */
+export function demandOf(loading: Loading, on: WorkingRecorder): void {
+  on.note(`${loading.combination.name}, ${loading.set}`, loading.combination.clause)
+  on.include(loading.working)
+}
 
 /** An ask of one loading. */
 export const ask = (subject: Subject, span: number, loading: Loading, effect: Effect, judge: Ask['judge']): Ask => ({

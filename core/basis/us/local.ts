@@ -1,10 +1,11 @@
 /** Shear of the span and the web under wheels and over bearings. */
-import { working, type WorkingRecorder } from '../../formula/working.ts'
+import { unrecorded, type WorkingRecorder } from '../../formula/working.ts'
 import { as, type Metre, type Newton } from '../../quantity/kinds.ts'
 import type { Ask, Subject, Verdict } from '../types.ts'
 import type { Design, Loading } from './design.ts'
-import { ask, judge } from './judgement.ts'
+import { ask, demandOf, judge } from './judgement.ts'
 import { shearStrength } from './shear.ts'
+import { reactionByStatics } from './standing.ts'
 import {
   availableCrippling,
   availableYielding,
@@ -21,12 +22,13 @@ const SHEAR: Subject = { id: 'us.shear', title: 'Shear', clause: { document: 'AI
 export function shearAsks(design: Design, span: number): readonly Ask[] {
   const strength = shearStrength(design.section, design.steel, design.job.basis.method)
   return design.loadings.map((loading) =>
-    ask(SHEAR, span, loading, { kind: 'shear', wheels: loading.vertical, uniform: loading.uniform }, (place) => {
-      const on = working()
-      on.note(`${loading.combination.name}, ${loading.set}`, loading.combination.clause)
-      const V_u = on.given('V_u', 'force', as('force', Math.abs(place.value)), 'greatest shear, dead load included')
+    ask(SHEAR, span, loading, { kind: 'shear', wheels: loading.vertical, uniform: loading.uniform }, (place, on) => {
+      demandOf(loading, on)
+      const end = place.value > 0 ? 'left' : 'right'
+      const V_u = on.given('V_u', 'force', as('force', Math.abs(place.value)), `greatest shear, at the ${end} bearing`)
+      reactionByStatics(design, place, { wheels: loading.vertical, uniform: loading.uniform }, end, on)
       on.include(strength.working)
-      return judge(on, 'force', ['V_u', V_u], ['R_c', strength.available])
+      return judge(on, 'force', ['V_u', V_u], ['V_c', strength.available])
     }),
   )
 }
@@ -117,9 +119,8 @@ function wheelAsks(design: Design, span: number, loading: Loading, state: LimitS
     const l_b = DISPERSAL.value(dispersal)
     const together = worstTogether(design, loading, state, l_b, where)
     const effect = { kind: 'stand', wheel: together.wheel, at, value: together.force } as const
-    return ask(subject(state, where === 'end' ? 'end' : 'wheel'), span, loading, effect, () => {
-      const on = working()
-      on.note(`${loading.combination.name}, ${loading.set}`, loading.combination.clause)
+    return ask(subject(state, where === 'end' ? 'end' : 'wheel'), span, loading, effect, (_place, on) => {
+      demandOf(loading, on)
       on.note(
         where === 'end'
           ? `A wheel within ${state.endZone === 1 ? 'd' : 'd/2'} of the girder’s end.`
@@ -158,7 +159,7 @@ function worstTogether(design: Design, loading: Loading, state: LimitState, l_b:
       if (last > first && wheels[last]!.offset - wheels[last - 1]!.offset >= reach) break
       force += loading.vertical[last]!
       const spread = wheels[last]!.offset - wheels[first]!.offset
-      const available = state.available(design, as('length', l_b + spread), where, 'top', working())
+      const available = state.available(design, as('length', l_b + spread), where, 'top', unrecorded)
       const utilisation = force / available
       if (utilisation > worst.utilisation) {
         worst = { wheel: first, count: last - first + 1, spread, force: as('force', force), utilisation }
@@ -178,9 +179,8 @@ function bearingAsks(design: Design, span: number, loading: Loading, state: Limi
       span,
       loading,
       { kind: 'endReaction', end, wheels: loading.vertical, uniform: loading.uniform },
-      (place) => {
-        const on = working()
-        on.note(`${loading.combination.name}, ${loading.set}`, loading.combination.clause)
+      (place, on) => {
+        demandOf(loading, on)
         const R_u = on.given(
           'R_u',
           'force',

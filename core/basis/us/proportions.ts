@@ -1,6 +1,6 @@
 /** Proportioning limits of AISC 360-22 F13.2 for unstiffened I shapes. */
 import { chapter } from '../../formula/chapter.ts'
-import { working } from '../../formula/working.ts'
+import { unrecorded, type WorkingRecorder } from '../../formula/working.ts'
 import type { Section } from '../../section/types.ts'
 import type { Judgement, Verdict } from '../types.ts'
 import type { Steel } from './flexure.ts'
@@ -23,32 +23,38 @@ const SLENDER_WEB = F13.formula('F13-4', {
 
 /** The limit of F13.2 that is used most. Those of slender webs hold where h/t_w passes 5.70 sqrt(E/F_y). */
 export function proportions(section: Section, steel: Steel): Verdict {
-  const lambda_w = WEB.value({ h: section.h, t_w: section.tw })
-  const limits: Judgement[] = [limit('lambda_w', 'lambda_max', lambda_w, 260, 'h/t_w of an unstiffened girder')]
-  if (section.aw > 0) limits.push(limit('a_w', 'a_max', section.aw, 10, 'twice the web in compression over the flange'))
-  if (!section.doublySymmetric) {
-    const i = SHARE.value({ I_yc: section.Iyc, I_y: section.Iy })
-    limits.push(
-      limit('i', 'i_max', i, 0.9, 'I_yc/I_y, not above 0.9'),
-      limit('1/i', '1/i_min', 1 / i, 10, 'I_y/I_yc, not above 10'),
+  const web = { h: section.h, t_w: section.tw }
+  const limits: ((on: WorkingRecorder) => Judgement)[] = [
+    (on) => limit(on, ['lambda_w', on.take(WEB, web)], ['lambda_max', 260], 'web of an unstiffened girder'),
+    (on) => limit(on, ['a_w', section.aw], ['a_max', 10], 'twice the web in compression over the compression flange'),
+  ]
+  if (WEB.value(web) > WEB_NONCOMPACT.value(steel)) {
+    limits.push((on) =>
+      limit(on, ['lambda_w', on.take(WEB, web)], ['lambda_max', on.take(SLENDER_WEB, steel)], 'slender web'),
     )
   }
-  if (lambda_w > WEB_NONCOMPACT.value(steel)) {
-    limits.push(limit('lambda_w', 'lambda_max', lambda_w, SLENDER_WEB.value(steel), 'h/t_w of a slender web'))
+  if (!section.doublySymmetric) {
+    const share = (on: WorkingRecorder): number => on.take(SHARE, { I_yc: section.Iyc, I_y: section.Iy })
+    limits.push(
+      (on) => limit(on, ['i', share(on)], ['i_max', 0.9], 'compression flange not above nine tenths'),
+      (on) => limit(on, ['i_min', 0.1], ['i', share(on)], 'compression flange not below a tenth'),
+    )
   }
-  const judgement = limits.reduce((a, b) => (b.utilisation > a.utilisation ? b : a))
+  const decided = limits.map((decide) => ({ decide, utilisation: decide(unrecorded).utilisation }))
+  const { decide, utilisation } = decided.reduce((a, b) => (b.utilisation > a.utilisation ? b : a))
   return {
     id: 'us.proportions',
     title: 'Proportions',
     clause: F13.clause('F13.2'),
-    status: judgement.utilisation <= 1 ? 'holds' : 'fails',
+    status: utilisation <= 1 ? 'holds' : 'fails',
     why: '',
-    judgement,
+    judge: decide,
   }
 }
 
-function limit(left: string, right: string, value: number, most: number, note: string): Judgement {
-  const on = working()
+type Named = readonly [symbol: string, value: number]
+
+function limit(on: WorkingRecorder, value: Named, most: Named, note: string): Judgement {
   on.note(note, F13.clause('F13.2'))
-  return judge(on, 'ratio', [left, value], [right, most])
+  return judge(on, 'ratio', value, most)
 }

@@ -1,8 +1,7 @@
 /** Deflection under one crane, static: vertical with the wheels as they stand, lateral of the top flange alone. */
 import { chapter } from '../../formula/chapter.ts'
-import { working } from '../../formula/working.ts'
 import type { Crane } from '../../job/types.ts'
-import { as, type NewtonSquareMetre } from '../../quantity/kinds.ts'
+import { as } from '../../quantity/kinds.ts'
 import type { Ask, Subject } from '../types.ts'
 import type { Design } from './design.ts'
 import { judge } from './judgement.ts'
@@ -75,10 +74,9 @@ export function deflectionAsks(design: Design, span: number): readonly Ask[] {
       combination: 'service',
       set,
       effect: { kind: 'deflection', wheels, stiffness: STIFFNESS.value(beam) },
-      judge: (place) => {
-        const on = working()
+      judge: (place, on) => {
         on.note(`${set}: no impact, no load factor, no dead load`)
-        on.take(STIFFNESS, beam) satisfies NewtonSquareMetre
+        on.take(STIFFNESS, beam)
         const delta = on.given(
           'delta',
           'length',

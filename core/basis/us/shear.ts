@@ -4,14 +4,15 @@ import { working, type Working } from '../../formula/working.ts'
 import type { Basis } from '../../job/types.ts'
 import { as, type Newton } from '../../quantity/kinds.ts'
 import type { Section } from '../../section/types.ts'
-import { availableForce } from './available.ts'
+import { available } from './available.ts'
 import type { Steel } from './flexure.ts'
 
 const G1 = chapter('AISC 360-22', 'G1')
 const G2 = chapter('AISC 360-22', 'G2')
 
-const availableRolled = availableForce(G2, 'G2.1(a)', { phi: 1, Omega: 1.5 })
-const availableOther = availableForce(G1, 'G1(a)', { phi: 0.9, Omega: 1.67 })
+const STRENGTH = { kind: 'force', strength: 'V', subscript: 'v' } as const
+const availableRolled = available(G2, 'G2.1(a)', { ...STRENGTH, phi: 1, Omega: 1.5 })
+const availableOther = available(G1, 'G1(a)', { ...STRENGTH, phi: 0.9, Omega: 1.67 })
 
 const WEB = { h: 'length', t_w: 'length', E: 'stress', F_y: 'stress' } as const
 const G2_2 = G2.formula('G2-2', { gives: ['C_v1', 'ratio'], where: {}, text: '1.0' })

@@ -1,11 +1,11 @@
 /** The web under a concentrated force: local yielding (J10.2) and local crippling (J10.3), AISC 360-22. */
 import { chapter } from '../../formula/chapter.ts'
-import { availableForce } from './available.ts'
+import { available } from './available.ts'
 
 const J10 = chapter('AISC 360-22', 'J10')
 
-export const availableYielding = availableForce(J10, 'J10.2', { phi: 1, Omega: 1.5 })
-export const availableCrippling = availableForce(J10, 'J10.3', { phi: 0.75, Omega: 2 })
+export const availableYielding = available(J10, 'J10.2', { kind: 'force', strength: 'R', phi: 1, Omega: 1.5 })
+export const availableCrippling = available(J10, 'J10.3', { kind: 'force', strength: 'R', phi: 0.75, Omega: 2 })
 
 const YIELDING = { F_yw: 'stress', t_w: 'length', k: 'length', l_b: 'length' } as const
 

@@ -58,16 +58,13 @@ const wheels = (walked: Walked, crane: number): void => {
 }
 
 const weights = (walked: Walked, crane: number): void => {
-  const isDerived = (path: (typeof LOADS)[number]) =>
-    seen(walked, path, crane) === 'derive' && (path === LOADS[0] || !walked.defaults.has(placed(path, [crane])))
-  const derived = LOADS.filter(isDerived).map((path) => path.slice('cranes[].'.length))
-  const split =
-    seen(walked, 'basis.craneDeadFactor') === 'split' && seen(walked, 'cranes[].emptyWheelLoad', crane) === 'derive'
-  if (split && !derived.includes('emptyWheelLoad')) derived.push('emptyWheelLoad')
-  const why = [
-    ...(derived.length > 0 ? [`${derived.join(', ')} ${derived.length > 1 ? 'are' : 'is'} derived from it`] : []),
-    ...(split ? ['basis.craneDeadFactor is "split"'] : []),
-  ]
+  const derived = LOADS.filter((path) => seen(walked, path, crane) === 'derive').map((path) =>
+    path.slice('cranes[].'.length),
+  )
+  const why =
+    derived.length === 0
+      ? []
+      : [`${derived.join(', ')} ${derived.length > 1 ? 'are' : 'is'} derived from it where not given`]
   const needs = (path: 'cranes[].bridgeWeight' | 'cranes[].trolleyWeight', because: readonly string[]) => {
     if (because.length > 0 && seen(walked, path, crane) === undefined)
       findAt(walked, path, [crane], `required, since ${because.join(' and ')}`)

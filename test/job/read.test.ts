@@ -177,7 +177,11 @@ describe('what follows from other entries', () => {
     at(job, 'cranes', 0).operation = 'hand'
     delete at(job, 'cranes', 0).trolleyWeight
     delete at(job, 'cranes', 0).bridgeWeight
-    at(job, 'cranes', 0).wheelLoad = ['5 kip', '5 kip']
+    Object.assign(at(job, 'cranes', 0), {
+      wheelLoad: [3e4, 3e4],
+      leastWheelLoad: [1e4, 1e4],
+      emptyWheelLoad: [1e4, 1e4],
+    })
     const crane = accepted(job).cranes[0]!
     expect([crane.bridgeDrive, crane.trolleyDrive, crane.hoistDrive]).toEqual(['hand', 'hand', 'hand'])
     expect(accepted(job).defaults).toContainEqual({
@@ -187,10 +191,14 @@ describe('what follows from other entries', () => {
     })
   })
 
-  test('given wheel loads need no weight of the bridge', () => {
+  test('where all wheel loads are given no weight of the bridge is needed', () => {
     const job = smallest()
     delete at(job, 'cranes', 0).bridgeWeight
-    at(job, 'cranes', 0).wheelLoad = ['38.1 kip', '38.1 kip']
+    Object.assign(at(job, 'cranes', 0), {
+      wheelLoad: [3e4, 3e4],
+      leastWheelLoad: [1e4, 1e4],
+      emptyWheelLoad: [1e4, 1e4],
+    })
     expect(accepted(job).cranes[0]).not.toHaveProperty('bridgeWeight')
   })
 

@@ -3,7 +3,7 @@ import type { Field } from '../field.ts'
 import { flag, object, share } from './entries.ts'
 
 const factor = { is: 'number', from: 0, to: 5 } as const
-const deflection = { is: 'number', above: 0, to: 100_000 } as const
+const deflection = { is: 'number', from: 0.001, to: 100_000 } as const
 
 export const BASIS = {
   basis: { name: 'Basis', meaning: 'Rules and choices.', entry: object, required: true },

@@ -30,13 +30,13 @@ export const CRANES = {
     name: 'Weight of the bridge',
     meaning: 'Bridge with end trucks, without trolley.',
     entry: weight,
-    required: 'where wheel loads are derived',
+    required: 'where any of the three wheel loads is derived',
   },
   'cranes[].trolleyWeight': {
     name: 'Weight of the trolley',
     meaning: 'Trolley with hoist.',
     entry: weight,
-    required: 'where wheel loads are derived or the trolley is powered (side thrust)',
+    required: 'where any of the three wheel loads is derived, or the trolley is powered (side thrust)',
   },
   'cranes[].belowHook': {
     name: 'Lifting gear below the hook',
@@ -106,7 +106,7 @@ export const CRANES = {
     meaning: 'From wheel to wheel on this rail: n - 1 values for n wheels, none for a single wheel.',
     entry: {
       is: 'list',
-      of: { is: 'quantity', kind: 'distance', above: '0 m', to: '100 m' },
+      of: { is: 'quantity', kind: 'distance', from: '1 mm', to: '100 m' },
       least: 0,
       most: 31,
     },

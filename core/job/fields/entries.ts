@@ -1,7 +1,7 @@
 /** Short forms of the entries that recur in the dictionary, with the wide limits that hold for all of their kind. */
 
 /** A dimension of a section or detail. */
-export const dimension = { is: 'quantity', kind: 'length', above: '0 mm', to: '10 m' } as const
+export const dimension = { is: 'quantity', kind: 'length', from: '1 mm', to: '10 m' } as const
 
 /** A thickness of a plate, a web or a flange. */
 export const thickness = { is: 'quantity', kind: 'length', from: '0.5 mm', to: '500 mm' } as const
@@ -13,7 +13,7 @@ export const distance = { is: 'quantity', kind: 'distance', from: '0 m', to: '10
 export const weight = { is: 'quantity', kind: 'forceOrMass', from: '0 kN', to: '20 MN' } as const
 
 /** A load that is there. */
-export const load = { is: 'quantity', kind: 'forceOrMass', above: '0 kN', to: '20 MN' } as const
+export const load = { is: 'quantity', kind: 'forceOrMass', from: '1 N', to: '20 MN' } as const
 
 /** A load per length of girder. */
 export const lineLoad = { is: 'quantity', kind: 'lineLoad', from: '0 kN/m', to: '1000 kN/m' } as const

@@ -30,14 +30,14 @@ const plateThickness = {
 
 const figure = <K extends 'area' | 'inertia' | 'modulus' | 'warping' | 'length' | 'lineMass'>(
   kind: K,
+  from: string,
   to: string,
-  zero: string,
   name: string,
 ) =>
   ({
     name,
     meaning: 'Handbook figure; taken instead of the one computed from the dimensions.',
-    entry: { is: 'quantity', kind, above: zero, to },
+    entry: { is: 'quantity', kind, from, to },
   }) as const
 
 const none = { text: 'none', source: 'nothing entered' } as const
@@ -106,18 +106,18 @@ export const GIRDER = {
     entry: { is: 'quantity', kind: 'length', from: '0 mm', to: '200 mm' },
     required: true,
   },
-  'girder.section.shape.A': figure('area', '10 m2', '0 m2', 'Area A'),
-  'girder.section.shape.Ix': figure('inertia', '10 m4', '0 m4', 'Moment of inertia Ix'),
-  'girder.section.shape.Sx': figure('modulus', '10 m3', '0 m3', 'Elastic modulus Sx'),
-  'girder.section.shape.Zx': figure('modulus', '10 m3', '0 m3', 'Plastic modulus Zx'),
-  'girder.section.shape.Iy': figure('inertia', '10 m4', '0 m4', 'Moment of inertia Iy'),
-  'girder.section.shape.Sy': figure('modulus', '10 m3', '0 m3', 'Elastic modulus Sy'),
-  'girder.section.shape.Zy': figure('modulus', '10 m3', '0 m3', 'Plastic modulus Zy'),
-  'girder.section.shape.J': figure('inertia', '10 m4', '0 m4', 'Torsional constant J'),
-  'girder.section.shape.Cw': figure('warping', '10 m6', '0 m6', 'Warping constant Cw'),
-  'girder.section.shape.rts': figure('length', '10 m', '0 m', 'Effective radius of gyration rts'),
-  'girder.section.shape.ho': figure('length', '10 m', '0 m', 'Distance between flange centroids ho'),
-  'girder.section.shape.massPerLength': figure('lineMass', '100000 kg/m', '0 kg/m', 'Mass per length'),
+  'girder.section.shape.A': figure('area', '1 mm2', '10 m2', 'Area A'),
+  'girder.section.shape.Ix': figure('inertia', '1 mm4', '10 m4', 'Moment of inertia Ix'),
+  'girder.section.shape.Sx': figure('modulus', '1 mm3', '10 m3', 'Elastic modulus Sx'),
+  'girder.section.shape.Zx': figure('modulus', '1 mm3', '10 m3', 'Plastic modulus Zx'),
+  'girder.section.shape.Iy': figure('inertia', '1 mm4', '10 m4', 'Moment of inertia Iy'),
+  'girder.section.shape.Sy': figure('modulus', '1 mm3', '10 m3', 'Elastic modulus Sy'),
+  'girder.section.shape.Zy': figure('modulus', '1 mm3', '10 m3', 'Plastic modulus Zy'),
+  'girder.section.shape.J': figure('inertia', '1 mm4', '10 m4', 'Torsional constant J'),
+  'girder.section.shape.Cw': figure('warping', '1 mm6', '10 m6', 'Warping constant Cw'),
+  'girder.section.shape.rts': figure('length', '0.1 mm', '10 m', 'Effective radius of gyration rts'),
+  'girder.section.shape.ho': figure('length', '0.1 mm', '10 m', 'Distance between flange centroids ho'),
+  'girder.section.shape.massPerLength': figure('lineMass', '0.01 kg/m', '100000 kg/m', 'Mass per length'),
   'girder.section.topFlange': { name: 'Top flange', meaning: 'The plate under the rail.', entry: object },
   'girder.section.topFlange.width': width('Width'),
   'girder.section.topFlange.thickness': plateThickness,

@@ -96,12 +96,12 @@ export const RUNWAY = {
   'runway.rail.mass': {
     name: 'Mass per length',
     meaning: 'US rails are named in pounds a yard.',
-    entry: { is: 'quantity', kind: 'lineMass', from: '0 kg/m', to: '1000 kg/m' },
+    entry: { is: 'quantity', kind: 'lineMass', from: '0.1 kg/m', to: '1000 kg/m' },
   },
   'runway.rail.ix': {
     name: 'Moment of inertia',
     meaning: 'About the horizontal axis.',
-    entry: { is: 'quantity', kind: 'inertia', above: '0 mm4', to: '1e10 mm4' },
+    entry: { is: 'quantity', kind: 'inertia', from: '1 mm4', to: '1e10 mm4' },
   },
   'runway.rail.fixing': {
     name: 'Fixing',
@@ -132,7 +132,7 @@ export const RUNWAY = {
   'runway.bearingLength': {
     name: 'Length of bearing',
     meaning: 'Of the girder on its support, along the span. Left out, the checks that need it are not covered.',
-    entry: { is: 'quantity', kind: 'length', above: '0 mm', to: '5 m' },
+    entry: { is: 'quantity', kind: 'length', from: '1 mm', to: '5 m' },
   },
   'runway.bracketEccentricity': {
     name: 'Eccentricity on the bracket',

@@ -3,7 +3,8 @@
  * and 250x14, web 650x8. The notes are one engineer's, not a standard: where they leave AISC 360-22 the case is put so that
  * its arithmetic alone is compared, and says what differs.
  */
-import { compressiveStrength } from '../basis/us/compression.ts'
+import { H1_1 } from '../basis/us/both-axes.ts'
+import { compressiveStrength, E3_FN } from '../basis/us/compression.ts'
 import { availableFlexure, flexuralStrength, type Steel } from '../basis/us/flexure.ts'
 import { flangeForces, leverArm, topFlangeStrength } from '../basis/us/flange.ts'
 import { wheelLoads } from '../crane/wheels.ts'
@@ -119,6 +120,16 @@ const read = (
 const loads = part('3')
 const girder = part('8')
 
+/** Result of the formula that gives this symbol in the derivation of the girder's strength. */
+const inStrength = (symbol: string): number => {
+  const step = strength().working.steps.find((each) => each.step === 'rule' && each.rule.symbol === symbol)
+  if (step?.step !== 'rule') throw new Error(`the derivation has no ${symbol}`)
+  return step.result
+}
+
+const force = (kN: number) => as('force', kN * 1e3)
+const kNm = (value: number) => as('moment', value * 1e3)
+
 export const RUNWAY_GIRDER: readonly EvidenceCase[] = [
   read('greatest wheel load', loads, 161.23913, 'kN', 5e-6, () => wheelLoads(CRANE, 0).greatest[0]! / 1e3),
   read('least wheel load', loads, 53.76087, 'kN', 5e-6, () => wheelLoads(CRANE, 0).least[0]! / 1e3),
@@ -194,6 +205,45 @@ export const RUNWAY_GIRDER: readonly EvidenceCase[] = [
     'kN m',
     0.005,
     () => strength().bottomYield / 1e3,
+  ),
+  read('web plastification factor of the compression flange', girder, 0.84568, '', 5e-6, () => inStrength('R_pc')),
+  read(
+    'stress FL by F4-6b',
+    girder,
+    224.519,
+    'MPa',
+    0.001,
+    () => inStrength('F_L') / 1e6,
+    'the notes multiply by the ratio rounded to 0.65078',
+  ),
+  read(
+    'flexural buckling stress by E3-2',
+    girder,
+    167.913,
+    'MPa',
+    5e-4,
+    () => {
+      const { elastic } = compressiveStrength(section(), STEEL, SPAN, SPAN)
+      return E3_FN.value({ F_y: STEEL.F_y, F_e: as('stress', elastic.y / section().A) }) / 1e6
+    },
+    'the notes stop at E3; the program also takes E4 (one axis of symmetry) and E7 (slender web), which give less',
+  ),
+  read(
+    'interaction H1-1b with the notes’ own figures',
+    girder,
+    0.96438,
+    '',
+    5e-6,
+    () =>
+      H1_1.value({
+        P_r: force(68.8),
+        P_c: force(2372.61),
+        M_rx: kNm(707.267),
+        M_cx: kNm(1232.433),
+        M_ry: kNm(71.509),
+        M_cy: kNm(190.181),
+      }),
+    'formula alone: the notes’ C_b of 1.2146, their r_t and their axial strength stand behind these figures',
   ),
   read(
     'elastic buckling load about y',

@@ -68,7 +68,8 @@ const E3_2 = E3.formula('E3-2', {
   text: '0.658^(F_y/F_e)*F_y',
 })
 const E3_3 = E3.formula('E3-3', { gives: ['F_n', 'stress'], where: { F_e: 'stress' }, text: '0.877*F_e' })
-const E3_FN = E3.cases('E3', [
+/** Nominal stress of flexural buckling. */
+export const E3_FN = E3.cases('E3', [
   { clause: '(a)', when: 'F_y/F_e <= 2.25', use: E3_2 },
   { clause: '(b)', otherwise: E3_3 },
 ])

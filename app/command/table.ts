@@ -32,7 +32,7 @@ export const reviewTable = (review: Review): string => {
 }
 
 const heading = ({ program, job, section }: Review): readonly string[] => [
-  ...wrap(job.project.title, 0),
+  ...wrap([job.project.title, job.project.subject ?? ''].filter((text) => text !== '').join(': '), 0),
   ...wrap(`${section.name}, ${spansText(job.runway.spans, job.units)}`, 0),
   `${job.basis.standard.toUpperCase()} rules, ${job.basis.method}; fingerprint ${job.fingerprint.slice(0, 12)}; longtravel ${program}`,
 ]

@@ -1,0 +1,63 @@
+/** Words into lines. */
+import type { Style } from './hand.ts'
+import { widthOf, type Pen } from './pen.ts'
+
+/** Text as it is drawn: composed letters, tabs as spaces, lines ended alike. */
+export const tidy = (text: string): string => text.normalize('NFC').replace(/\r\n?/g, '\n').replaceAll('\t', '    ')
+
+/** Broken into lines no wider than `width`, at spaces; a word that is wider is broken where it must be. */
+export function wrap(pen: Pen, text: string, style: Style, width: number): string[] {
+  return tidy(text)
+    .split('\n')
+    .flatMap((paragraph) => wrapParagraph(pen, paragraph, style, width))
+}
+
+/** The first `most` lines; where there are more the last one ends with an ellipsis. */
+export function wrapAtMost(pen: Pen, text: string, style: Style, width: number, most: number): string[] {
+  const lines = wrap(pen, text, style, width)
+  if (lines.length <= most) return lines
+  const kept = lines.slice(0, most)
+  let last = [...kept[most - 1]!]
+  while (last.length > 0 && widthOf(pen, `${last.join('')}…`, style) > width) last = last.slice(0, -1)
+  return [...kept.slice(0, -1), `${last.join('').trimEnd()}…`]
+}
+
+function wrapParagraph(pen: Pen, text: string, style: Style, width: number): string[] {
+  const lines: string[] = []
+  let line = ''
+  let used = 0
+  const space = widthOf(pen, ' ', style)
+  for (const word of text.split(' ')) {
+    const wide = widthOf(pen, word, style)
+    if (line !== '' && used + space + wide <= width) {
+      line += ` ${word}`
+      used += space + wide
+      continue
+    }
+    if (line.trim() !== '') lines.push(line)
+    const pieces = wide <= width ? [word] : broken(pen, word, style, width)
+    lines.push(...pieces.slice(0, -1))
+    line = pieces.at(-1)!
+    used = widthOf(pen, line, style)
+  }
+  return [...lines, line].map((each) => each.trimEnd())
+}
+
+/** A word wider than a line, in parts: after a hyphen, a slash or a dot where there is one far enough along, else anywhere. */
+function broken(pen: Pen, word: string, style: Style, width: number): string[] {
+  const pieces: string[] = []
+  let rest = letters(word)
+  for (;;) {
+    let count = 0
+    let used = 0
+    while (count < rest.length && (used += widthOf(pen, rest[count]!, style)) <= width) count += 1
+    if (count === rest.length) return [...pieces, rest.join('')]
+    const after = rest.slice(0, count).findLastIndex((letter) => /[-/._,;:\\–—]/.test(letter)) + 1
+    const cut = Math.max(1, after > count / 2 ? after : count)
+    pieces.push(rest.slice(0, cut).join(''))
+    rest = rest.slice(cut)
+  }
+}
+
+/** Characters, marks with the letter they stand on. */
+const letters = (word: string): string[] => word.match(/\P{M}\p{M}*|\p{M}+/gu) ?? []

@@ -39,7 +39,7 @@ export const plain: Script = {
   fraction: (top, bottom) => `${top}/${bottom}`,
   power: (base, exponent) => `${base}^${exponent}`,
   root: (of, degree) => `${degree === 2 ? 'sqrt' : 'cbrt'}(${of})`,
-  absolute: (of) => `|${of}|`,
+  absolute: (of) => `abs(${of})`,
   call: (name, args) => `${name}(${args.join(', ')})`,
   group: (inner, depth) => brackets(depth).join(inner),
 }

@@ -1,6 +1,6 @@
 /** Closures and typesetting against the parser's own evaluation, on random formulas of every shape. */
 import fc from 'fast-check'
-import { evaluate } from 'mathjs/number'
+import { OperatorNode, isOperatorNode, parse, type MathNode } from 'mathjs/number'
 import { describe, expect, it } from 'vitest'
 import { FormulaError } from '../../core/formula/types.ts'
 import { readExpression, symbolsOf } from '../../core/formula/expression.ts'
@@ -53,18 +53,29 @@ const formulaOf = (text: string) =>
     text,
   })
 
-/** The number two ways should share; undefined where the second has none, or hides a division by zero. */
-function agreed(text: string, values: Record<string, number>): number | undefined {
-  const result: unknown = evaluate(text, { ...values })
+/** What the parser evaluates; undefined where that is not a finite number. */
+function evaluated(text: string, values: Record<string, number>): number | undefined {
+  // The parser's own min and max take numbers for equal that differ in the last digits.
+  const result: unknown = multiplied(parse(text)).evaluate({ ...values, min: Math.min, max: Math.max })
   return typeof result === 'number' && Number.isFinite(result) ? result : undefined
 }
 
+/** Squares and cubes as products, as the closures compute them: powers differ from those in the last digit. */
+function multiplied(node: MathNode): MathNode {
+  const tree = node.map(multiplied)
+  if (!isOperatorNode(tree) || (tree.fn as string) !== 'pow') return tree
+  const [base, exponent] = tree.args as [MathNode, MathNode]
+  const times = (a: MathNode, b: MathNode): MathNode => new OperatorNode('*', 'multiply', [a, b])
+  if (exponent.toString() === '2') return times(base, base)
+  return exponent.toString() === '3' ? times(times(base, base), base) : tree
+}
+
 describe('on random formulas', () => {
-  it('closures give what the parser evaluates', () => {
+  it('closures give what the parser evaluates, to the last digit', () => {
     let compared = 0
     fc.assert(
       fc.property(text, scope, (text, values) => {
-        const expected = agreed(text, values)
+        const expected = evaluated(text, values)
         const formula = formulaOf(text)
         if (expected === undefined) {
           expect(() => formula.value(values)).toThrow(FormulaError)
@@ -80,7 +91,7 @@ describe('on random formulas', () => {
           return
         }
         compared += 1
-        expect(Math.abs(result - expected)).toBeLessThanOrEqual(1e-9 * Math.max(1, Math.abs(expected)))
+        expect(result === expected, `${text}: ${result}, ${expected}`).toBe(true)
       }),
       { numRuns: 3000 },
     )
@@ -88,14 +99,19 @@ describe('on random formulas', () => {
   })
 
   it('the plain text of a formula means what the formula means', () => {
+    const near = (a: number, b: number): boolean => Math.abs(a - b) <= 1e-9 * Math.max(1, Math.abs(b))
     fc.assert(
-      fc.property(text, scope, (text, values) => {
-        const expected = agreed(text, values)
-        fc.pre(expected !== undefined)
+      fc.property(text, fc.array(scope, { minLength: 5, maxLength: 5 }), (text, scopes) => {
         const printed = setSymbols(readExpression(text), plain)
-        const again = agreed(typedOut(printed), values)
-        expect(again, `${text} printed as ${printed}`).toBeDefined()
-        expect(Math.abs(again! - expected)).toBeLessThanOrEqual(1e-9 * Math.max(1, Math.abs(expected)))
+        const pairs = scopes.flatMap((values) => {
+          const expected = evaluated(text, values)
+          return expected === undefined ? [] : [[evaluated(typedOut(printed), values), expected] as const]
+        })
+        fc.pre(pairs.length > 0)
+        // Brackets that change nothing are not printed, so sums may be taken in another order: where large numbers cancel,
+        // digits are lost. A lost bracket would show at all five places.
+        const agree = pairs.some(([again, expected]) => again !== undefined && near(again, expected))
+        expect(agree, `${text} printed as ${printed}`).toBe(true)
       }),
       { numRuns: 3000 },
     )
@@ -112,26 +128,9 @@ describe('on random formulas', () => {
 })
 
 /** Printed text with its brackets round, its products starred and its thousands joined, as the parser wants them. */
-function typedOut(printed: string): string {
-  let out = printed
+const typedOut = (printed: string): string =>
+  printed
     .replace(/(\d),(?=\d{3}(\D|$))/g, '$1')
     .replace(/[[{]/g, '(')
     .replace(/[\]}]/g, ')')
-  while (/\|[^|]*\|/.test(out)) out = bars(out)
-  return out.replace(/(?<=[\w)]) (?=[\w(])/g, '*')
-}
-
-/** Turns one innermost pair of bars into a call. A bar opens after an operator, a bracket, a space or at the start. */
-function bars(text: string): string {
-  const opened: number[] = []
-  for (let at = 0; at < text.length; at++) {
-    if (text[at] !== '|') continue
-    const opens = at === 0 || /[-+*/(^ |]/.test(text[at - 1]!)
-    if (opens && text[at + 1] !== undefined && !/[ )]/.test(text[at + 1]!)) opened.push(at)
-    else {
-      const start = opened.pop()!
-      return `${text.slice(0, start)}abs(${text.slice(start + 1, at)})${text.slice(at + 1)}`
-    }
-  }
-  throw new Error(`bars of ${text}`)
-}
+    .replace(/(?<=[\w)]) (?=[\w(])/g, '*')

@@ -8,10 +8,13 @@ import type { Newton, Ratio } from '../quantity/kinds.ts'
 export interface CraneWheels {
   /** Rated load, trolley as near to this rail as it comes. */
   readonly greatest: readonly Newton[]
-  /** Rated load, trolley as near to the far rail as it comes: this rail's wheels while the far ones have their greatest. */
-  readonly least: readonly Newton[]
+  /**
+   * Rated load, trolley as near to the far rail as it comes: this rail's wheels while the far ones have their greatest.
+   * Undefined where it is not given and the weights to derive it from are not either; so too for the empty crane.
+   */
+  readonly least?: readonly Newton[]
   /** No load, trolley as near to the far rail as it comes. */
-  readonly empty: readonly Newton[]
+  readonly empty?: readonly Newton[]
   /** Part of each greatest load that is bridge and trolley; undefined where the weights do not tell it. */
   readonly dead?: readonly Newton[]
   readonly working: Working
@@ -65,8 +68,8 @@ const DEAD = bridge.formula('bridge and trolley', {
  * Wheel loads of a crane; `index` is its place in the job, for the paths that cautions name. Derived by statics, each rail
  * taking half the bridge, every wheel of a rail the same (common practice); lifting gear below the hook counts with the
  * lifted load. Given loads are taken as they are; where the weights give any wheel a load more than 10 % off, a caution
- * names both. Throws RangeError where loads are to be derived and a weight is missing, or where a list does not fit the
- * number of wheels: reading a job refuses both.
+ * names both. Throws RangeError where the greatest loads are to be derived and a weight is missing, or where a list does not
+ * fit the number of wheels: reading a job refuses both.
  */
 export const wheelLoads = (crane: Crane, index: number): CraneWheels => {
   const on = working()
@@ -83,7 +86,10 @@ export const wheelLoads = (crane: Crane, index: number): CraneWheels => {
   const [greatest, least, empty] = entered.map(([field, list]) => {
     const path = `cranes[${index}].${field}`
     if (list === 'derive') {
-      if (derived === undefined) throw new RangeError(`${path}: to be derived, but a weight is missing`)
+      if (derived === undefined) {
+        if (field === 'wheelLoad') throw new RangeError(`${path}: to be derived, but a weight is missing`)
+        return undefined
+      }
       return new Array<Newton>(count).fill(derived[field](on))
     }
     if (list.length !== count) throw new RangeError(`${path}: ${list.length} loads for ${count} wheels`)
@@ -93,7 +99,7 @@ export const wheelLoads = (crane: Crane, index: number): CraneWheels => {
     const expected = derived?.[field](working())
     if (expected !== undefined) cautions.push(...differences(crane.name, path, list, expected))
     return list
-  }) as [readonly Newton[], readonly Newton[], readonly Newton[]]
+  }) as [readonly Newton[], readonly Newton[] | undefined, readonly Newton[] | undefined]
 
   const part = derived?.dead(crane.wheelLoad === 'derive' ? on : working())
   const within = part === undefined || greatest.every((load) => load >= part)
@@ -102,7 +108,7 @@ export const wheelLoads = (crane: Crane, index: number): CraneWheels => {
       `cranes[${index}].wheelLoad: a wheel of ${crane.name} is given less than bridge and trolley make it by their weights. The whole wheel load is taken as lifted.`,
     )
   const dead = part !== undefined && within ? { dead: new Array<Newton>(count).fill(part) } : {}
-  return { greatest, least, empty, ...dead, working: on, cautions }
+  return { greatest, ...(least && { least }), ...(empty && { empty }), ...dead, working: on, cautions }
 }
 
 const SYMBOL = { wheelLoad: 'P_max', leastWheelLoad: 'P_min', emptyWheelLoad: 'P_empty' } as const

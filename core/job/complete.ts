@@ -114,6 +114,7 @@ const runway = (walked: Walked): Runway => {
       eccentricity: given(walked, 'runway.rail.eccentricity'),
     }),
     bearingLength: given(walked, 'runway.bearingLength'),
+    bracketEccentricity: given(walked, 'runway.bracketEccentricity'),
     endDistance: given(walked, 'runway.endDistance'),
   })
 }

@@ -58,7 +58,10 @@ const wheels = (walked: Walked, crane: number): void => {
 }
 
 const weights = (walked: Walked, crane: number): void => {
-  const derived = LOADS.filter((path) => seen(walked, path, crane) === 'derive').map((path) =>
+  // Least and empty loads that were left out stay unknown where no weight tells them; nothing but the greatest is always needed.
+  const asked = (path: (typeof LOADS)[number]): boolean =>
+    path === 'cranes[].wheelLoad' || walked.entered.has(placed(path, [crane]))
+  const derived = LOADS.filter((path) => asked(path) && seen(walked, path, crane) === 'derive').map((path) =>
     path.slice('cranes[].'.length),
   )
   const why =
@@ -151,6 +154,9 @@ const steels = (walked: Walked): void => {
     if (fy !== undefined && fu !== undefined && fu < fy)
       findAt(walked, `${part}.fu`, [], `must not be below the yield stress, ${Number((fy / 1e6).toPrecision(6))} MPa`)
     else if (seen(walked, part)) steelOf(walked, part)
+    const [own, E] = [seen(walked, `${part}.E`), seen(walked, 'girder.steel.E')]
+    if (seen(walked, part) && own !== undefined && E !== undefined && own !== E)
+      findAt(walked, `${part}.E`, [], 'a modulus other than that of girder.steel is not covered by this version')
   }
 }
 

@@ -96,6 +96,7 @@ export interface Runway {
     readonly eccentricity?: Metre
   }
   readonly bearingLength?: Metre
+  readonly bracketEccentricity?: Metre
   readonly endDistance?: Metre
 }
 

@@ -11,6 +11,7 @@ export function handedOn(design: Design, beam: Beam): HandedOn {
   const none = as('lineLoad', 0)
   const { spans } = beam
   const force = (value: number): Quantity<'force'> => ({ kind: 'force', value: as('force', value) })
+  const turned = (value: number): Quantity<'moment'> => ({ kind: 'moment', value: as('moment', value) })
   // Supports between equal spans are loaded alike: each kind is driven once.
   const known = new Map<string, { wheels: number; wheelsWithImpact: number; sideThrust: number }>()
 
@@ -34,12 +35,15 @@ export function handedOn(design: Design, beam: Beam): HandedOn {
     const key = `${left} ${right}`
     const wheels = known.get(key) ?? greatest(support)
     known.set(key, wheels)
+    const dead = (design.dead * (left + right)) / 2
+    const arm = design.job.runway.bracketEccentricity
     return {
       support,
-      dead: force((design.dead * (left + right)) / 2),
+      dead: force(dead),
       wheels: force(wheels.wheels),
       wheelsWithImpact: force(wheels.wheelsWithImpact),
       sideThrust: force(wheels.sideThrust),
+      ...(arm === undefined ? {} : { moment: turned((dead + wheels.wheelsWithImpact) * arm) }),
     }
   })
   return { brackets, longitudinal: force(Math.max(0, ...loadings.map((loading) => loading.longitudinal))) }

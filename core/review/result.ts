@@ -171,12 +171,13 @@ const checkOf = (check: Check, place: (of: Place) => ResultPlace): ResultCheck =
 })
 
 const handedOnOf = ({ brackets, longitudinal }: HandedOn) => ({
-  brackets: brackets.map(({ support, dead, wheels, wheelsWithImpact, sideThrust }) => ({
+  brackets: brackets.map(({ support, dead, wheels, wheelsWithImpact, sideThrust, moment }) => ({
     support,
     dead: dead.value,
     wheels: wheels.value,
     wheelsWithImpact: wheelsWithImpact.value,
     sideThrust: sideThrust.value,
+    moment: moment?.value ?? null,
   })),
   longitudinal: longitudinal.value,
 })

@@ -48,6 +48,8 @@ export interface HandedOn {
     readonly wheels: Quantity<'force'>
     readonly wheelsWithImpact: Quantity<'force'>
     readonly sideThrust: Quantity<'force'>
+    /** Of dead load and wheels with impact about the column's face; undefined where no eccentricity is entered. */
+    readonly moment?: Quantity<'moment'>
   }[]
   /** To the braced bay: greatest longitudinal force of this rail in any set of cranes, unfactored. */
   readonly longitudinal: Quantity<'force'>

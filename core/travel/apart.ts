@@ -45,7 +45,7 @@ export interface Apart {
   readonly stations: Float64Array
 }
 
-/** The worst place found with free gaps; never better than `contact`, the worst with the cranes bumper to bumper. */
+/** The worst place found with free gaps: at least as bad as `contact`, the worst with the cranes bumper to bumper. */
 export const apart = (row: Row, cranes: readonly number[], terms: readonly SweepTerm[], contact: Swept): Apart => {
   const L = row.length
   const ends = cranes.flatMap((crane, i) => (cranes[i + 1] === crane ? [] : [i + 1]))

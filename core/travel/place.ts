@@ -2,6 +2,7 @@
 import { as } from '../quantity/kinds.ts'
 import type { WheelTrain } from '../crane/types.ts'
 import { STATION_TOLERANCE, spanOf } from './influence.ts'
+import { EQUAL } from './passage.ts'
 import type { Beam, Extreme } from './types.ts'
 
 /** The wheels of a train in order of station, as distances from its first wheel (negative on its left). */
@@ -31,7 +32,7 @@ export const stationsOf = (train: WheelTrain | undefined, mirrored: boolean, lea
   train === undefined ? [] : train.wheels.map(({ offset }) => (mirrored ? lead - offset : lead + offset))
 
 /** Lead and direction of every crane, told by the stations of the train's wheels. */
-export const positionsOf = (
+const positionsOf = (
   train: WheelTrain | undefined,
   mirrored: boolean,
   stations: readonly number[],
@@ -56,3 +57,20 @@ export const onSpan = (
     return x < -near || x > length + near ? [] : [{ wheel, x: Math.min(Math.max(x, 0), length) }]
   })
 }
+
+/** The entries of an extreme that tell where the train stands. */
+export const placed = (
+  index: number | undefined,
+  train: WheelTrain | undefined,
+  mirrored: boolean,
+  stations: readonly number[],
+): Pick<Extreme, 'lead' | 'mirrored' | 'train' | 'positions'> => ({
+  lead: as('distance', stations[0] ?? 0),
+  mirrored,
+  train: index,
+  positions: positionsOf(train, mirrored, stations),
+})
+
+/** The greater one; of equal ones the first. */
+export const worse = <T extends { readonly value: number }>(a: T, b: T): T =>
+  b.value > a.value + EQUAL * Math.abs(a.value) ? b : a

@@ -12,6 +12,26 @@ export interface Standing {
   readonly right: number
 }
 
+/** The girder under some of a train's wheels and a uniform load. */
+export const standingOf = (
+  length: number,
+  on: readonly { readonly wheel: number; readonly x: number }[],
+  wheels: readonly number[],
+  uniform: number,
+): Standing => ({
+  length,
+  loads: on.map(({ wheel, x }) => ({ x, force: wheels[wheel]! })),
+  uniform,
+  left: 0,
+  right: 0,
+})
+
+/** Size of the moments' addends, by which rounding is measured, N m. */
+export const sizeOf = ({ length, loads, uniform, left, right }: Standing): number =>
+  loads.reduce((sum, { force }) => sum + Math.abs(force), Math.abs(uniform) * length) * length +
+  Math.abs(left) +
+  Math.abs(right)
+
 /** Reactions, each from the moments about the other support. */
 export const reactions = ({ length: L, loads, uniform, left, right }: Standing) => {
   const about = (arm: (x: number) => number): number => loads.reduce((sum, { x, force }) => sum + force * arm(x), 0)
@@ -44,11 +64,10 @@ export const shearAt = (standing: Standing, x: number): number => {
 
 /** Throws an EquilibriumError unless the reactions carry the loads and the moment at x is the same from both sides. */
 export const proveEquilibrium = (standing: Standing, x: number): void => {
-  const { length: L, loads, uniform, left, right } = standing
+  const { length: L, loads, uniform, right } = standing
   const support = reactions(standing)
   const total = loads.reduce((sum, { force }) => sum + force, 0) + uniform * L
-  const size = loads.reduce((sum, { force }) => sum + Math.abs(force), 0) + Math.abs(uniform) * L
-  const moments = size * L + Math.abs(left) + Math.abs(right)
+  const moments = sizeOf(standing)
   const fromRight =
     right +
     support.right * (L - x) -

@@ -174,11 +174,24 @@ const readVertices = (
       return
     }
     const found = crests[t]!
+    const least = surest(found, (b - a) / 2)
     for (let i = 0; i < found.count; i++)
-      choose(t + 1, slopes + factor * found.slope[i]!, curvatures + factor * found.curvature[i]!)
+      if (reach(found, i, (b - a) / 2, 1) >= least)
+        choose(t + 1, slopes + factor * found.slope[i]!, curvatures + factor * found.curvature[i]!)
   }
   choose(0, fixed, 0)
   for (const s of vertices) read(s)
+}
+
+/** The most (sign 1) or least (sign -1) that a crest's moment can be within `half` of the lead it was read at. */
+const reach = ({ moment, slope, curvature }: Crests, i: number, half: number, sign: 1 | -1): number =>
+  moment[i]! + sign * (Math.abs(slope[i]!) * half + (Math.max(0, sign * curvature[i]!) * half * half) / 2)
+
+/** What the greatest crest is not below anywhere within `half`: crests that cannot reach it are never the greatest. */
+const surest = (crests: Crests, half: number): number => {
+  let least = -Infinity
+  for (let i = 0; i < crests.count; i++) least = Math.max(least, reach(crests, i, half, -1))
+  return least
 }
 
 /** Leads at which a moving wheel meets a support or a fixed station, ascending, closed by the bounds where there are any. */

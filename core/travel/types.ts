@@ -52,6 +52,8 @@ export type Effect =
   /** One wheel stood at a station: an effect that no position of the train changes (web under a wheel). */
   | { readonly kind: 'stand'; readonly wheel: number; readonly at: Metre; readonly value: number }
 
+export type EffectOf<Kind extends Effect['kind']> = Extract<Effect, { readonly kind: Kind }>
+
 /** The train and the span an effect is asked of. `train` is undefined where only dead load acts. */
 export interface Drive {
   readonly beam: Beam

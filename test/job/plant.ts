@@ -110,6 +110,7 @@ export const rolledInFull = (): Draft => ({
     topFlangeRestraint: 'none',
     rail: { name: 'ASCE 85', fixing: 'clips', wear: '2 mm', pad: false, eccentricity: '6 mm' },
     bearingLength: '200 mm',
+    bracketEccentricity: '400 mm',
     endDistance: '10 in',
   },
   girder: {

@@ -84,6 +84,7 @@ describe('a job with everything left out that may be', () => {
       'girder.capSteel',
       'girder.plateSteel',
       'runway.bearingLength',
+      'runway.bracketEccentricity',
       'project.client',
       'cranes[0].years',
     ])
@@ -105,6 +106,7 @@ describe('a job with every covered entry given', () => {
         unbracedLength: 5,
         unbracedLengthBottom: 6,
         bearingLength: 0.2,
+        bracketEccentricity: 0.4,
         endDistance: 0.254,
       },
     })

@@ -29,7 +29,7 @@ const F6_2 = F6.formula('F6-2', {
     lambda_pf: 'ratio',
     lambda_rf: 'ratio',
   },
-  text: 'M_p - (M_p - 0.70*F_y*S_y)*(lambda - lambda_pf)/(lambda_rf - lambda_pf)',
+  text: 'M_p - (M_p - 0.70*F_y*S_y)*((lambda - lambda_pf)/(lambda_rf - lambda_pf))',
 })
 const F6_3 = F6.formula('F6-3', {
   gives: ['M_n', 'moment'],

@@ -48,7 +48,7 @@ const F2_2 = F2.formula('F2-2', {
     L_p: 'distance',
     L_r: 'distance',
   },
-  text: 'C_b*(M_p - (M_p - 0.7*F_y*S_x)*(L_b - L_p)/(L_r - L_p))',
+  text: 'C_b*(M_p - (M_p - 0.7*F_y*S_x)*((L_b - L_p)/(L_r - L_p)))',
   atMost: 'M_p',
 })
 const F2_3 = F2.formula('F2-3', {
@@ -107,7 +107,7 @@ const F3_1 = F3.formula('F3-1', {
     lambda_pf: 'ratio',
     lambda_rf: 'ratio',
   },
-  text: 'M_p - (M_p - 0.7*F_y*S_x)*(lambda - lambda_pf)/(lambda_rf - lambda_pf)',
+  text: 'M_p - (M_p - 0.7*F_y*S_x)*((lambda - lambda_pf)/(lambda_rf - lambda_pf))',
 })
 const F3_2 = F3.formula('F3-2', {
   gives: ['M_n', 'moment'],
@@ -160,7 +160,7 @@ const F4_9B = F4.formula('F4-9b', {
     lambda_pw: 'ratio',
     lambda_rw: 'ratio',
   },
-  text: 'M_p/M_yc - (M_p/M_yc - 1)*(lambda_w - lambda_pw)/(lambda_rw - lambda_pw)',
+  text: 'M_p/M_yc - (M_p/M_yc - 1)*((lambda_w - lambda_pw)/(lambda_rw - lambda_pw))',
   atMost: 'M_p/M_yc',
 })
 const ONE_PC = F4.formula('F4-10', { gives: ['R_pc', 'ratio'], where: {}, text: '1.0' })
@@ -188,7 +188,7 @@ const F4_16B = F4.formula('F4-16b', {
     lambda_pw: 'ratio',
     lambda_rw: 'ratio',
   },
-  text: 'M_p/M_yt - (M_p/M_yt - 1)*(lambda_w - lambda_pw)/(lambda_rw - lambda_pw)',
+  text: 'M_p/M_yt - (M_p/M_yt - 1)*((lambda_w - lambda_pw)/(lambda_rw - lambda_pw))',
   atMost: 'M_p/M_yt',
 })
 const ONE_PT = F4.formula('F4-17', { gives: ['R_pt', 'ratio'], where: {}, text: '1.0' })
@@ -218,7 +218,7 @@ const F4_2 = F4.formula('F4-2', {
     L_p: 'distance',
     L_r: 'distance',
   },
-  text: 'C_b*(R_pc*M_yc - (R_pc*M_yc - F_L*S_xc)*(L_b - L_p)/(L_r - L_p))',
+  text: 'C_b*(R_pc*M_yc - (R_pc*M_yc - F_L*S_xc)*((L_b - L_p)/(L_r - L_p)))',
   atMost: 'R_pc*M_yc',
 })
 const F4_3 = F4.formula('F4-3', {
@@ -282,7 +282,7 @@ const F4_13 = F4.formula('F4-13', {
     lambda_pf: 'ratio',
     lambda_rf: 'ratio',
   },
-  text: 'R_pc*M_yc - (R_pc*M_yc - F_L*S_xc)*(lambda - lambda_pf)/(lambda_rf - lambda_pf)',
+  text: 'R_pc*M_yc - (R_pc*M_yc - F_L*S_xc)*((lambda - lambda_pf)/(lambda_rf - lambda_pf))',
 })
 const F4_14 = F4.formula('F4-14', {
   gives: ['M_n', 'moment'],

@@ -136,9 +136,9 @@ export const RUNWAY = {
   },
   'runway.bracketEccentricity': {
     name: 'Eccentricity on the bracket',
-    meaning: 'From the face of the column to the middle of the girder.',
+    meaning:
+      'From the face of the column to the middle of the girder: turns the bracket reaction that is handed on into a moment.',
     entry: detail,
-    notCovered: 'all',
   },
   'runway.endDistance': {
     name: 'End distance',

@@ -38,7 +38,7 @@ export const passLine = (
   for (let e = events.length - 2; e >= 0; e--) {
     const from = events[e]!
     const reach = events[e + 1]! - from
-    if (!(reach > 0)) continue
+    if (!(reach > SAME * (Math.abs(from) + Math.abs(breaks.at(-1)!)))) continue
     let a = 0
     let b = 0
     let c = 0
@@ -64,6 +64,9 @@ export const passLine = (
   }
   return { max, min }
 }
+
+/** Two places nearer than this part of their distance from the first support are one: a wheel never meets both half-way. */
+const SAME = 1e-14
 
 /** Values nearer than this part are equal: of mirror images the first stays, whatever the rounding. */
 export const EQUAL = 1e-13

@@ -79,7 +79,9 @@ describe('wheels passing a line', () => {
     }
     fc.assert(
       fc.property(anyTrain(), ({ loads, spacings }) => {
-        const offsets = Float64Array.from(loads, (_, i) => spacings.slice(0, i).reduce((a, b) => a + b, 0))
+        // Whole millimetres: extremes that last for less than the steps below cannot be looked for.
+        const apart = spacings.map((spacing) => Math.ceil(spacing * 1000) / 1000)
+        const offsets = Float64Array.from(loads, (_, i) => apart.slice(0, i).reduce((a, b) => a + b, 0))
         const { max, min } = passLine(line, offsets, Float64Array.from(loads))
         const sum = (lead: number): number =>
           loads.reduce((all, load, i) => all + load * ordinate(lead + offsets[i]!), 0)

@@ -66,7 +66,7 @@ export function registerFaces(doc: PDFKit.PDFDocument): Faces {
     },
     undrawn: (text) => [
       ...new Set(
-        [...text].filter(
+        Array.from(text).filter(
           (character) => fileFor(character, 'regular') === undefined || fileFor(character, 'semibold') === undefined,
         ),
       ),

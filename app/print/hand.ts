@@ -63,7 +63,6 @@ export const STYLE = {
   foot: style('regular', 7, 9, COLOUR.grey),
   footStrong: style('semibold', 7, 9, COLOUR.accent),
   title: style('regular', 9, 11.4),
-  drawing: style('regular', 7.6, 9.6),
   /** Small letterspaced capitals over what they name. */
   label: { ...style('regular', 6.2, 8, COLOUR.grey), spacing: 0.7 },
 } as const

@@ -14,7 +14,7 @@ export interface Pen {
 
 /** Width of words on one line. */
 export function widthOf(pen: Pen, text: string, style: Style): number {
-  let width = (style.spacing ?? 0) * [...text].length
+  let width = (style.spacing ?? 0) * Array.from(text).length
   for (const run of pen.faces.runs(text, style.face))
     width += pen.doc.font(run.file).fontSize(style.size).widthOfString(run.text)
   return width
@@ -33,7 +33,7 @@ export function write(pen: Pen, text: string, style: Style, x: number, baseline:
       baseline: 'alphabetic',
       ...(spacing === 0 ? {} : { characterSpacing: spacing }),
     })
-    at += doc.widthOfString(run.text) + spacing * [...run.text].length
+    at += doc.widthOfString(run.text) + spacing * Array.from(run.text).length
   }
 }
 
@@ -60,7 +60,7 @@ export function rule(
 ): void {
   const { doc } = pen
   doc.save().lineWidth(weight).strokeColor(colour)
-  if (dash) doc.dash(dash as never)
+  if (dash) doc.dash(dash as unknown as number, {})
   doc
     .moveTo(...from)
     .lineTo(...to)
@@ -69,7 +69,15 @@ export function rule(
 }
 
 /** A box: its outline. */
-export function box(pen: Pen, x: number, y: number, width: number, height: number, colour: string, weight: number): void {
+export function box(
+  pen: Pen,
+  x: number,
+  y: number,
+  width: number,
+  height: number,
+  colour: string,
+  weight: number,
+): void {
   pen.doc.save().lineWidth(weight).strokeColor(colour).rect(x, y, width, height).stroke().restore()
 }
 
@@ -114,7 +122,7 @@ export const openTag = (pen: Pen, type: string, options: TagOptions = {}): Tag =
 
 function tagUnder(pen: Pen, parent: PDFKit.PDFStructureElement, type: string, options: TagOptions): Tag {
   // The types know neither bounding box nor scope, which the library does.
-  const element = pen.doc.struct(type, options as PDFKit.Mixins.StructureElementOptions)
+  const element = pen.doc.struct(type, options)
   parent.add(element)
   return {
     draw: (draw) => {

@@ -17,7 +17,7 @@ export function wrapAtMost(pen: Pen, text: string, style: Style, width: number, 
   const lines = wrap(pen, text, style, width)
   if (lines.length <= most) return lines
   const kept = lines.slice(0, most)
-  let last = [...kept[most - 1]!]
+  let last = Array.from(kept[most - 1]!)
   while (last.length > 0 && widthOf(pen, `${last.join('')}…`, style) > width) last = last.slice(0, -1)
   return [...kept.slice(0, -1), `${last.join('').trimEnd()}…`]
 }

@@ -1,0 +1,154 @@
+/** A formula that is too wide for its column, set in several rows. */
+import { typeset, type Drawing } from './formula.ts'
+import { leaf, mathOf, row, type Element } from './mathml.ts'
+
+/** One row of a formula as it is drawn. */
+export interface FormulaRow {
+  readonly drawing: Drawing
+  /** Where its first relation stands, so that the rows below can stand under it; undefined where it has none. */
+  readonly relation: number | undefined
+  /** Whether it begins with a relation. */
+  readonly related: boolean
+}
+
+/**
+ * Sets parts in rows, the first one no wider than `first`, the others no wider than `later` (thousandths of an em), broken
+ * before relations first, then before plus and minus, then at products; a fraction, root or bracket that is wider than a
+ * row is opened and broken inside.
+ */
+export function formulaRows(parts: readonly Element[], first: number, later: number): readonly FormulaRow[] {
+  const rows: FormulaRow[] = []
+  let rest = parts
+  while (rest.length > 0) {
+    const width = rows.length === 0 ? first : later
+    const drawing = set(rest)
+    if (drawing.width <= width) return [...rows, rowOf(rest, drawing)]
+    const cut = cutOf(rest, drawing, width)
+    if (cut === undefined) {
+      const opened = open(rest, drawing, width)
+      // One sign wider than the column: nothing can be broken, and the page scales it.
+      if (opened === undefined) return [...rows, rowOf(rest, drawing)]
+      rest = opened
+      continue
+    }
+    const head = rest.slice(0, cut)
+    rows.push(rowOf(head, set(head)))
+    rest = continued(rest.slice(cut))
+  }
+  return rows
+}
+
+const set = (parts: readonly Element[]): Drawing => {
+  const text = mathOf(parts)
+  const known = memory.get(text)
+  if (known) return known
+  const drawing = typeset(text)
+  if (memory.size >= REMEMBERED) memory.clear()
+  memory.set(text, drawing)
+  return drawing
+}
+
+/** Formulas set before; a sheet sets the same symbols for every place of a check. */
+const memory = new Map<string, Drawing>()
+const REMEMBERED = 2000
+
+const rowOf = (parts: readonly Element[], drawing: Drawing): FormulaRow => {
+  const index = parts.findIndex((part) => rankOf(part) === 0)
+  return { drawing, relation: index < 0 ? undefined : drawing.starts[index], related: index === 0 }
+}
+
+/** Before which part to break: the last place that leaves the row within the width, the strongest kind of place first. */
+function cutOf(parts: readonly Element[], drawing: Drawing, width: number): number | undefined {
+  let best: number | undefined
+  let bestRank = Number.POSITIVE_INFINITY
+  for (let index = 1; index < parts.length; index += 1) {
+    const end = drawing.starts[index]
+    if (end === undefined || end > width) break
+    const rank = rankOf(parts[index]!)
+    // A weaker place is taken only where the stronger one would leave the row mostly empty.
+    const start = best === undefined ? 0 : drawing.starts[best]!
+    if (rank <= bestRank || (Number.isFinite(rank) && start < width * 0.4)) {
+      if (!Number.isFinite(rank)) continue
+      best = index
+      bestRank = rank
+    }
+  }
+  return best
+}
+
+/** How good a place before this part is: relations, then sums, then products; infinite where none is. */
+function rankOf(part: Element): number {
+  if (part.name !== 'mo') return Number.POSITIVE_INFINITY
+  if (/^(=|≤|≥|&lt;|&gt;)$/.test(part.text)) return 0
+  if (/^[+\u2212]$/.test(part.text)) return 1
+  return /^[×\u2062/]$/.test(part.text) ? 2 : Number.POSITIVE_INFINITY
+}
+
+/** What goes on in the next row: a product that shows no sign gets one, so that it is read as one. */
+function continued(parts: readonly Element[]): readonly Element[] {
+  const [first, ...others] = parts
+  return first?.name === 'mo' && first.text === '\u2062' ? [leaf('mo', '×'), ...others] : parts
+}
+
+/** The first part that can be opened at or before the column's edge, opened: its contents written in the row. */
+function open(parts: readonly Element[], drawing: Drawing, width: number): readonly Element[] | undefined {
+  const crossing = parts.findIndex((_, index) => (drawing.starts[index + 1] ?? drawing.width) > width)
+  for (let index = crossing; index >= 0; index -= 1) {
+    const inner = contents(parts[index]!)
+    if (inner) return [...parts.slice(0, index), ...inner, ...parts.slice(index + 1)]
+  }
+  return undefined
+}
+
+/** A part written along the line instead: a fraction with a slash, a root as a power. */
+function contents({ name, children }: Element): readonly Element[] | undefined {
+  const [first, second] = children
+  switch (name) {
+    case 'mrow':
+      // A figure and its unit stay together.
+      return children.some((child) => child.name === 'mspace') ? undefined : children
+    case 'mfrac':
+      return [...grouped([first!]), leaf('mo', '/'), ...grouped([second!])]
+    case 'msqrt':
+      return raised(children, row([leaf('mn', '1'), leaf('mo', '/'), leaf('mn', '2')]))
+    case 'mroot':
+      return raised([first!], row([leaf('mn', '1'), leaf('mo', '/'), second!]))
+    case 'msup':
+      return isLeaf(first!) ? undefined : raised([first!], second!)
+    default:
+      return undefined
+  }
+}
+
+/** In brackets of the row itself, which may be broken between them; a single sign or figure needs none. */
+function grouped(parts: readonly Element[]): readonly Element[] {
+  const inner = parts.length === 1 && parts[0]!.name === 'mrow' ? parts[0]!.children : parts
+  if (inner.length === 1 && isLeaf(inner[0]!)) return inner
+  return inBrackets(inner) ? inner : [bracket('('), ...inner, bracket(')')]
+}
+
+function raised(parts: readonly Element[], exponent: Element): readonly Element[] {
+  const inner = grouped(parts)
+  return [...inner.slice(0, -1), { name: 'msup', attributes: '', children: [inner.at(-1)!, exponent], text: '' }]
+}
+
+const bracket = (sign: '(' | ')'): Element => ({
+  name: 'mo',
+  attributes: ' stretchy="false"',
+  children: [],
+  text: sign,
+})
+
+const inBrackets = (parts: readonly Element[]): boolean => /^[([{]$/.test(parts[0]?.text ?? '') && closes(parts)
+
+/** Whether the last sign closes the first one. */
+function closes(parts: readonly Element[]): boolean {
+  let depth = 0
+  return parts.every((part, index) => {
+    if (part.name === 'mo' && /^[([{]$/.test(part.text)) depth += 1
+    if (part.name === 'mo' && /^[)\]}]$/.test(part.text)) depth -= 1
+    return depth > 0 || index === parts.length - 1
+  })
+}
+
+const isLeaf = (part: Element): boolean => /^(mi|mn|mtext|msub)$/.test(part.name)

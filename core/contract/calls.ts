@@ -14,31 +14,30 @@ const PAPERS = ['a4', 'letter'] as const
 /** A calc sheet is some megabytes at the most. */
 const MOST_PDF_BYTES = 200_000_000
 
-const Pdf = v.pipe(
-  v.instance(Uint8Array),
-  v.check((bytes) => bytes.length <= MOST_PDF_BYTES, `has at most ${MOST_PDF_BYTES} bytes`),
+const Pdf = v.custom<Uint8Array>(
+  (value) => value instanceof Uint8Array && value.length <= MOST_PDF_BYTES,
+  `right would be at most ${MOST_PDF_BYTES} bytes`,
 )
 
+const list = <T extends v.GenericSchema>(item: T) => v.pipe(v.array(item), v.readonly())
+
 export const CALLS = {
-  'projects.list': call(nothing, v.array(Project)),
+  'projects.list': call(nothing, list(Project)),
   'projects.create': call(v.strictObject({ name: Name, numbering: v.picklist(NUMBERINGS) }), Project),
-  'jobs.list': call(v.strictObject({ project: Id }), v.array(JobEntry)),
+  'jobs.list': call(v.strictObject({ project: Id }), list(JobEntry)),
   'jobs.create': call(v.strictObject({ project: Id, name: Name }), JobEntry),
   'jobs.rename': call(v.strictObject({ job: Id, name: Name }), JobEntry),
   /** The desk computes what it keeps from the text; findings in the text are an error of kind `job`, and nothing is kept. */
   'revisions.keep': call(v.strictObject({ job: Id, text: JobText, ...RevisionStatement.entries }), RevisionSummary),
   /** In the order they were kept. */
-  'revisions.list': call(v.strictObject({ job: Id }), v.array(RevisionSummary)),
+  'revisions.list': call(v.strictObject({ job: Id }), list(RevisionSummary)),
   'revisions.open': call(v.strictObject({ revision: Id }), Revision),
   /** A text with findings is no error of the call: they are its answer. */
   review: call(
     v.strictObject({ text: JobText }),
     v.variant('ok', [
       v.strictObject({ ok: v.literal(true), result: ResultFile }),
-      v.strictObject({
-        ok: v.literal(false),
-        findings: v.array(v.looseObject(Fault.entries)),
-      }),
+      v.strictObject({ ok: v.literal(false), findings: list(Fault) }),
     ]),
   ),
   /**
@@ -69,8 +68,8 @@ export const CALLS = {
       /** Of the record; a record of a newer program is refused. */
       schema: v.number(),
       record: v.variant('access', [
-        v.strictObject({ access: v.literal('write'), cautions: v.array(v.string()) }),
-        v.strictObject({ access: v.literal('read'), cautions: v.array(v.string()), because: CallError }),
+        v.strictObject({ access: v.literal('write'), cautions: list(v.string()) }),
+        v.strictObject({ access: v.literal('read'), cautions: list(v.string()), because: CallError }),
         v.strictObject({ access: v.literal('none'), because: CallError }),
       ]),
     }),

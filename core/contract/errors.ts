@@ -41,14 +41,10 @@ export const CallError = v.strictObject({
   kind: v.picklist(ERROR_KINDS),
   message: v.string(),
   /** Field by field, for `argument` and `job`. */
-  at: v.optional(v.array(Fault)),
+  at: v.exactOptional(v.pipe(v.array(Fault), v.readonly())),
 })
 
-export interface CallError {
-  readonly kind: ErrorKind
-  readonly message: string
-  readonly at?: readonly v.InferOutput<typeof Fault>[]
-}
+export type CallError = Readonly<v.InferOutput<typeof CallError>>
 
 export type Outcome<T> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: CallError }
 

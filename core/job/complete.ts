@@ -1,4 +1,5 @@
 /** A job without findings as the value the rest of the program works on. */
+import type { Newton } from '../quantity/kinds.ts'
 import type { FieldPath, Given } from './fields.ts'
 import { craneName, craneOfKey, driveOf } from './rules.ts'
 import { steelOf, type SteelPath } from './steel.ts'
@@ -74,6 +75,9 @@ const crane = (walked: Walked, index: number): Crane => {
   show(walked, placed('cranes[].name', [index]), craneName(walked, index))
   const [first, last] = given(walked, 'cranes[].bumperOverhang', index)
   const hookApproach = given(walked, 'cranes[].hookApproach', index)
+  const count = given(walked, 'cranes[].wheelSpacings', index).length + 1
+  const eachWheel = (loads: 'derive' | Newton | readonly Newton[]): 'derive' | readonly Newton[] =>
+    typeof loads === 'number' ? Array.from({ length: count }, () => loads) : loads
   return present<Crane>({
     name: craneName(walked, index),
     ratedCapacity: given(walked, 'cranes[].ratedCapacity', index),
@@ -87,9 +91,9 @@ const crane = (walked: Walked, index: number): Crane => {
     ...drives,
     serviceClass: given(walked, 'cranes[].serviceClass', index),
     wheelSpacings: given(walked, 'cranes[].wheelSpacings', index),
-    wheelLoad: given(walked, 'cranes[].wheelLoad', index),
-    leastWheelLoad: given(walked, 'cranes[].leastWheelLoad', index),
-    emptyWheelLoad: given(walked, 'cranes[].emptyWheelLoad', index),
+    wheelLoad: eachWheel(given(walked, 'cranes[].wheelLoad', index)),
+    leastWheelLoad: eachWheel(given(walked, 'cranes[].leastWheelLoad', index)),
+    emptyWheelLoad: eachWheel(given(walked, 'cranes[].emptyWheelLoad', index)),
     bumperOverhang: [first!, last!],
   })
 }

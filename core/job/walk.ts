@@ -216,7 +216,7 @@ const readEntry = (tools: Tools, field: Field, entry: Entry, json: Json, pattern
       return keys
     }
     case 'either': {
-      const fits = entry.of.find((one) => sameForm(one, json))
+      const fits = entry.of.find((one) => sameForm(one, json) && (one.is !== 'quantity' || beginsAsNumber(json)))
       return fits ? readEntry(tools, field, fits, json, pattern, path) : wrong()
     }
     case 'object': {
@@ -265,11 +265,17 @@ const within = (entry: NumberEntry | QuantityEntry, value: number): boolean => {
 }
 
 const sameForm = (entry: Entry, json: Json): boolean => {
+  if (entry.is === 'choice') return typeof json === 'string' && entry.of.includes(json)
+  if (entry.is === 'quantity') return typeof json === 'string' || typeof json === 'number'
   if (entry.is === 'list') return Array.isArray(json)
   if (entry.is === 'map' || entry.is === 'object') return isObject(json)
   if (entry.is === 'number') return typeof json === 'number'
   return typeof json === 'string'
 }
+
+/** Beside words of choice only what begins as a number is read as a quantity: of "derived" the choices are told. */
+const beginsAsNumber = (json: Json): boolean =>
+  typeof json !== 'string' || /^[\s(+\u2212-]*[\d.\u00bc-\u00be\u2150-\u215e]/.test(json)
 
 export const isObject = (json: Json | undefined): json is JsonObject =>
   typeof json === 'object' && json !== null && !Array.isArray(json)

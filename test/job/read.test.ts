@@ -21,6 +21,18 @@ describe('a job with everything left out that may be', () => {
     expect(job.runway.rail).toMatchObject({ name: 'ASCE 40', height: 0.0889, wear: 0 })
   })
 
+  test('one wheel load stands for every wheel', () => {
+    const draft = smallest()
+    const [crane] = draft.cranes as [Draft]
+    const { cranes } = accepted({
+      ...draft,
+      cranes: [{ ...crane, wheelSpacings: ['4 ft', '8 ft'], wheelLoad: '30 kip' }],
+    })
+    expect(cranes[0]!.wheelLoad).toEqual(
+      [30 * kip, 30 * kip, 30 * kip].map((load) => expect.closeTo(load, 6) as number),
+    )
+  })
+
   test('takes the defaults', () => {
     expect(job.units).toBe('us')
     expect(job.basis).toEqual({

@@ -116,8 +116,8 @@ export const CRANES = {
     name: 'Wheel loads',
     meaning:
       'Static, with the rated load and the trolley at least approach, without impact and without the crane’s own design ' +
-      'factors: a value a wheel, or "derive" from the weights. Given loads win over the weights.',
-    entry: { is: 'either', of: [derive, { is: 'list', of: load, least: 1, most: 32 }] },
+      'factors: one value for all wheels, a list with a value a wheel, or "derive" from the weights. Given loads win over the weights.',
+    entry: { is: 'either', of: [derive, load, { is: 'list', of: load, least: 1, most: 32 }] },
     default: {
       entry: 'derive',
       source: 'ASCE 7-22 4.9.2: bridge, rated capacity and trolley where the effect is greatest',
@@ -126,13 +126,13 @@ export const CRANES = {
   'cranes[].leastWheelLoad': {
     name: 'Least wheel loads',
     meaning: 'The same with the trolley at the far rail.',
-    entry: { is: 'either', of: [derive, { is: 'list', of: weight, least: 1, most: 32 }] },
+    entry: { is: 'either', of: [derive, weight, { is: 'list', of: weight, least: 1, most: 32 }] },
     default: { entry: 'derive', source: 'from the weights, trolley at the far rail' },
   },
   'cranes[].emptyWheelLoad': {
     name: 'Empty wheel loads',
     meaning: 'The same without load on the hook.',
-    entry: { is: 'either', of: [derive, { is: 'list', of: weight, least: 1, most: 32 }] },
+    entry: { is: 'either', of: [derive, weight, { is: 'list', of: weight, least: 1, most: 32 }] },
     default: { entry: 'derive', source: 'from the weights, nothing on the hook' },
   },
   'cranes[].drivenWheels': {

@@ -1,19 +1,31 @@
 /** A job without findings as the value the rest of the program works on. */
 import type { Newton } from '../quantity/kinds.ts'
 import type { FieldPath, Given } from './fields.ts'
+import type { Json } from './json.ts'
 import { craneName, craneOfKey, driveOf } from './rules.ts'
 import { steelOf, type SteelPath } from './steel.ts'
 import type { Basis, Cap, Crane, CraneSet, Girder, Job, Plate, Runway, SectionEntry, SteelEntry } from './types.ts'
-import { placed, seen, type Walked } from './walk.ts'
+import { isObject, placed, seen, type Walked } from './walk.ts'
 
 /** Throws where an entry is missing that the dictionary requires: only without findings may a job be completed. */
 export const complete = (walked: Walked, fingerprint: string): Job => ({
   ...entries(walked),
   fingerprint,
+  entered: enteredLeaves(walked),
   defaults: [...walked.defaults.values()],
 })
 
-const entries = (walked: Walked): Omit<Job, 'fingerprint' | 'defaults'> => ({
+/** Texts as typed; numbers, flags and lists of them as JSON writes them. Objects are told by their own fields. */
+const enteredLeaves = ({ entered }: Walked): Job['entered'] =>
+  [...entered].flatMap(([path, json]) => {
+    if (isObject(json) || (Array.isArray(json) && json.some((each) => isObject(each)))) return []
+    const value = Array.isArray(json) ? json.map(asTyped).join(', ') : asTyped(json)
+    return [{ path, value }]
+  })
+
+const asTyped = (json: Json): string => (typeof json === 'string' ? json : JSON.stringify(json))
+
+const entries = (walked: Walked): Omit<Job, 'fingerprint' | 'entered' | 'defaults'> => ({
   project: present<Job['project']>({
     title: given(walked, 'project.title'),
     number: given(walked, 'project.number'),

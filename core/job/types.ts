@@ -21,6 +21,8 @@ export interface Job {
   readonly girder: Girder
   /** SHA-256 of the job as entered, hex. */
   readonly fingerprint: string
+  /** What stood in the file, leaf by leaf, in its own order. */
+  readonly entered: readonly { readonly path: string; readonly value: string }[]
   /** Paths whose value is a default, with where it comes from: `cranes[0].bumperOverhang` -> "0.6 m, ...". */
   readonly defaults: readonly DefaultTaken[]
 }

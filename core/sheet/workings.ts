@@ -1,0 +1,43 @@
+/** The derivation of every check at its worst place. */
+import { elevationFigure } from '../figure/elevation.ts'
+import { writeWorking } from '../formula/write.ts'
+import type { UnitSystem } from '../quantity/kinds.ts'
+import type { Check, Review } from '../review/types.ts'
+import { citation } from '../sources/clause.ts'
+import { heading, plain } from './block.ts'
+import { FIGURE_WIDTH, placeOf } from './governing.ts'
+import type { Block } from './types.ts'
+
+export function workingsPart(review: Review, units: UnitSystem, number: string): readonly Block[] {
+  const judged = review.checks.filter((check) => check.working !== undefined)
+  return [
+    heading(1, number, 'Workings'),
+    ...judged.flatMap((check, index) => workingOf(review, check, units, `${number}.${index + 1}`)),
+  ]
+}
+
+function workingOf(review: Review, check: Check, units: UnitSystem, number: string): readonly Block[] {
+  const { at, combination, set, utilisation } = check
+  const blocks: Block[] = [heading(2, number, check.title)]
+  if (at !== undefined) {
+    const refined = at.method === 'refined' ? ' Found by closing in to 1e-9 of the span.' : ''
+    blocks.push(
+      plain(`${combination ?? ''}, ${set ?? ''}. ${placeOf(review, at, units)}${refined}`, citation(check.clause)),
+    )
+    if (DRAWN.has(check.id)) {
+      const figure = elevationFigure(review, at, { units, width: FIGURE_WIDTH })
+      blocks.push({ block: 'figure', figure, caption: 'Static wheel loads, where this check governs' })
+    }
+  } else {
+    blocks.push(plain('Wherever the cranes stand.', citation(check.clause)))
+  }
+  const holds = check.status !== 'fails'
+  return [
+    ...blocks,
+    { block: 'working', lines: writeWorking(check.working!(), units) },
+    { block: 'verdict', text: `${holds ? 'holds' : 'fails'}, ${utilisation!.toFixed(3)}`, holds },
+  ]
+}
+
+/** Checks whose own position is worth a drawing beside that of the greatest moment. */
+const DRAWN: ReadonlySet<string> = new Set(['us.flexure.biaxial', 'us.shear', 'us.deflection.vertical'])

@@ -8,7 +8,7 @@ import { spanOf } from '../travel/influence.ts'
 import type { Extreme } from '../travel/types.ts'
 import { distanceText } from './dimension.ts'
 import { EDGE, firstFree, within } from './layout.ts'
-import { beamOf, scaleOf, viewOf, wheelName, wheelsAt, type Shown } from './standing.ts'
+import { beamOf, scaleOf, wheelName, wheelsAt, type Shown } from './standing.ts'
 import { CLEAR, LINE, RISE, boxOf, type Text } from './text.ts'
 import type { Figure, Item, Point } from './types.ts'
 
@@ -153,7 +153,7 @@ const trainsOf = (review: Review, extreme: Extreme, loads: readonly number[] | u
 const draw = (review: Review, extreme: Extreme, shown: Shown, diagram: Diagram): Figure => {
   const { units, width } = shown
   const { kind, down, present, envelope, mark } = diagram
-  const scale = scaleOf(shown.view ?? viewOf(review, extreme), width)
+  const scale = scaleOf(review, extreme, shown)
   const { start, length } = spanOf(beamOf(review), extreme.span)
   const across = (x: number): number => scale.across(start + x)
   const write = (value: number): string => writeQuantity({ kind, value: as(kind, value) }, units)
@@ -190,7 +190,7 @@ const draw = (review: Review, extreme: Extreme, shown: Shown, diagram: Diagram):
   const label =
     mark.value === 0 ? `${write(0)} at this position` : `${write(mark.value)} at station ${station}${mark.where}`
   const near = within({ item: 'text', at: [markX, rowOf(!below)], text: label, role: 'ink', anchor: 'middle' }, width)
-  put([near, ...texts.flatMap((other) => besideOf(near, other))])
+  put([near, ...clearOf(near, texts)])
   const edge = envelope.map(({ x, max, min }) => at({ x, value: below === (down === 1) ? max : min })[1])
   const hidden = mark.value !== 0 && Math.abs((below ? Math.max(...edge) : Math.min(...edge)) - markY) > 1.5
   const leader: Item = {
@@ -232,12 +232,15 @@ const draw = (review: Review, extreme: Extreme, shown: Shown, diagram: Diagram):
   }
 }
 
-/** A text moved along its line to just left or right of another. */
-const besideOf = (text: Text, other: Text): readonly Text[] => {
-  const [own, taken] = [boxOf(text), boxOf(other)]
-  return [taken.left - own.right - 2 * CLEAR, taken.right - own.left + 2 * CLEAR].map((shift) => {
-    return { ...text, at: [text.at[0] + shift, text.at[1]] }
-  })
+/** A text moved along its line to just left or right of others on it, the least move first. */
+const clearOf = (text: Text, others: readonly Text[]): readonly Text[] => {
+  const own = boxOf(text)
+  const shifts = others
+    .filter(({ at }) => at[1] === text.at[1])
+    .map(boxOf)
+    .flatMap((other) => [other.left - own.right - 2 * CLEAR, other.right - own.left + 2 * CLEAR])
+    .sort((a, b) => Math.abs(a) - Math.abs(b))
+  return shifts.map((shift): Text => ({ ...text, at: [text.at[0] + shift, text.at[1]] }))
 }
 
 /** The envelope's shear at either support, on the side where it is greatest. */

@@ -12,8 +12,9 @@ export interface Mark {
   readonly station: number
 }
 
+/** A distance or station in the unit shown; what is less than a nanometre is the rounding of a station, not a distance. */
 export const distanceText = (metres: number, units: UnitSystem): string =>
-  writeQuantity({ kind: 'distance', value: as('distance', metres) }, units)
+  writeQuantity({ kind: 'distance', value: as('distance', Math.abs(metres) < 1e-9 ? 0 : metres) }, units)
 
 /** A slash across a dimension line. */
 export const tick = ([x, y]: Point): Item => ({

@@ -11,7 +11,6 @@ import {
   beamOf,
   proofAt,
   scaleOf,
-  viewOf,
   wheelName,
   wheelsAt,
   type Scale,
@@ -35,7 +34,7 @@ const ARROW = 9
 export const elevationFigure = (review: Review, extreme: Extreme, shown: Shown): Figure => {
   const { units, width } = shown
   const wheels = wheelsAt(review, extreme, shown.loads)
-  const scale = scaleOf(shown.view ?? viewOf(review, extreme), width)
+  const scale = scaleOf(review, extreme, shown)
   const { start, length } = spanOf(beamOf(review), extreme.span)
   const midspan = scale.across(start + length / 2)
   const seen = wheels.filter((wheel) => inView(wheel, scale))
@@ -86,11 +85,12 @@ export const elevationFigure = (review: Review, extreme: Extreme, shown: Shown):
   const names = lower + 0.5 + 0.6 + RISE
   const row = (text: string, x: number, role: Text['role'], line = 0): Text =>
     within({ item: 'text', at: [x, names + line * (LINE + CLEAR)], text, role, anchor: 'middle' }, width)
+  const rows = [0, 1, 2, 3, 4, 5]
   for (const { support, x } of runway.supports) {
-    const text = `support ${support + 1}`
-    if (!put([row(text, x, 'dimension')])) put([row(String(support + 1), x, 'dimension')])
+    const words = [`support ${support + 1}`, String(support + 1)]
+    put([...words, ...words].map((text, i) => row(text, x, 'dimension', i < 2 ? 0 : 1)))
   }
-  put([0, 1, 2].map((line) => row('midspan', midspan, 'dimension', line)))
+  put(rows.map((line) => row('midspan', midspan, 'dimension', line)))
   if (resultant !== undefined && wheels.filter(({ on, force }) => on && force !== 0).length > 1) {
     const x = scale.across(resultant.station)
     const text = `resultant ${forceText(resultant.force, units)}`
@@ -99,7 +99,7 @@ export const elevationFigure = (review: Review, extreme: Extreme, shown: Shown):
     }
     const heights = [tails + RISE + 0.8, tails + RISE + 3.4]
     const high = heights.flatMap((y) => [beside('start', y), beside('end', y)])
-    const low = [0, 1, 2, 3].flatMap((line) => {
+    const low = rows.flatMap((line) => {
       const middle = row(text, x, 'accent', line)
       const from = (anchor: 'start' | 'end'): Text => ({ ...middle, at: [x, middle.at[1]], anchor })
       return [middle, from('start'), from('end')]
@@ -175,27 +175,33 @@ const proofLines = (proof: MomentProof, scale: Scale, midspan: number, underside
   const drawn = [proof.wheelFromMidspan, proof.resultantFromMidspan].filter(
     (metres) => Math.abs(metres) * scale.perMetre > 1e-6,
   )
-  for (const [i, metres] of drawn.entries()) {
-    if (i > 0 && drawn[0]! * metres > 0) y += ABOVE + 1
-    const x = midspan + metres * scale.perMetre
+  const measured = drawn.map((metres) => {
     const text = distanceText(Math.abs(metres), units)
-    const inside = textWidth(text) + 2 * CLEAR <= Math.abs(x - midspan)
+    const x = midspan + metres * scale.perMetre
+    const needed = textWidth(text) + 2 * CLEAR
     const side = metres < 0 ? -1 : 1
-    // Too short for its text: the line goes on outward under it.
-    const outer = inside ? x : x + side * (textWidth(text) + 2 * CLEAR)
-    items.push(
-      {
-        item: 'line',
-        points: [
-          [midspan, y],
-          [outer, y],
-        ],
-        role: 'dimension',
-      },
-      tick([x, y]),
-      tick([midspan, y]),
-    )
-    if (i === 0)
+    const inside = needed <= Math.abs(x - midspan)
+    // Too short for its text: the line goes on under it, outward, or the other way where the frame is near.
+    const outward = x + side * needed
+    const fits = outward >= EDGE && outward <= width - EDGE
+    const [from, to] = inside ? [midspan, x] : fits ? [x, outward] : [midspan, midspan - side * needed]
+    return { text, x, from, to, oneSided: inside || fits }
+  })
+  const [first, second] = measured
+  const oneLine = drawn[0]! * drawn[1]! < 0 && measured.every(({ oneSided }) => oneSided)
+  for (const dimension of measured) {
+    const { text, x, from, to } = dimension
+    if (dimension === second && !oneLine) y += ABOVE + 1
+    items.push({
+      item: 'line',
+      points: [
+        [Math.min(midspan, x, to), y],
+        [Math.max(midspan, x, to), y],
+      ],
+      role: 'dimension',
+    })
+    items.push(tick([x, y]), tick([midspan, y]))
+    if (dimension === first)
       items.push({
         item: 'line',
         points: [
@@ -204,8 +210,7 @@ const proofLines = (proof: MomentProof, scale: Scale, midspan: number, underside
         ],
         role: 'hair',
       })
-    const middle = inside ? (x + midspan) / 2 : (x + outer) / 2
-    texts.push(within({ item: 'text', at: [middle, over(y)], text, role: 'dimension', anchor: 'middle' }, width))
+    texts.push({ item: 'text', at: [(from + to) / 2, over(y)], text, role: 'dimension', anchor: 'middle' })
   }
   return { items, texts, bottom: drawn.length === 0 ? underside : y + 1 }
 }

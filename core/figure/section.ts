@@ -6,7 +6,7 @@ import type { Section } from '../section/types.ts'
 import { ABOVE, over, tick } from './dimension.ts'
 import { EDGE, spread } from './layout.ts'
 import { outlinesOf, railOutline } from './outline.ts'
-import { LINE, RISE, textWidth, type Text } from './text.ts'
+import { LINE, RISE, boxOf, textWidth, type Text } from './text.ts'
 import type { Figure, Item, Point } from './types.ts'
 import { forceText } from './wheel-loads.ts'
 
@@ -60,17 +60,20 @@ export const sectionFigure = (section: Section, entry: SectionEntry, shown: Sect
     role: 'ink',
   }
   const inner = centre - half - 4.5
+  // Below the words of the side thrust.
+  const room = [Math.max(top - 0.5, head + 2), bottom] as const
   const heights = upright(
     inner,
     [bottom, bottom - section.yBar * perMetre, top],
     [section.yBar, section.depth - section.yBar],
     length,
-    bottom,
+    room,
   )
-  const depth = upright(inner - 5, [bottom, top], [section.depth], length, bottom)
+  const depth = upright(inner - 5, [bottom, top], [section.depth], length, room)
   const foot = bottom + 1.5 + ABOVE
   const from = centre - (section.bottom.width * perMetre) / 2
   const to = centre + (section.bottom.width * perMetre) / 2
+  const lowest = [...heights, ...depth].flatMap((item) => (item.item === 'text' ? [boxOf(item).bottom] : []))
   const extension = (points: readonly Point[]): Item => ({ item: 'line', points, role: 'hair' })
   const bottomWidth: readonly Item[] = [
     extension([
@@ -107,7 +110,7 @@ export const sectionFigure = (section: Section, entry: SectionEntry, shown: Sect
   const axis = (height: number): Item => ({
     item: 'line',
     points: [
-      [inner - 0.8, bottom - height * perMetre],
+      [height === section.yBar ? inner : inner + 1, bottom - height * perMetre],
       [reach, bottom - height * perMetre],
     ],
     role: 'centre',
@@ -115,9 +118,10 @@ export const sectionFigure = (section: Section, entry: SectionEntry, shown: Sect
   const axes = section.doublySymmetric ? [section.yBar] : [section.yBar, section.yPlastic]
   const notes = notesOf(section, entry, rail, length).map(({ at: [x, y], texts }) => ({ at: paper([x, y]), texts }))
   const column = reach + 3.5
+  const noteFoot = Math.max(foot + 0.8, head + 1.1 + notes.length * NOTE)
   return {
     width,
-    height: foot + 0.8 + EDGE,
+    height: Math.max(noteFoot, ...lowest) + EDGE,
     items: [
       ...steel,
       railArea,
@@ -126,7 +130,7 @@ export const sectionFigure = (section: Section, entry: SectionEntry, shown: Sect
       ...heights,
       ...depth,
       ...bottomWidth,
-      ...noteItems(notes, { column, reach, width, from: head + 1, to: foot + 0.8 }),
+      ...noteItems(notes, { column, reach, width, from: head + 1, to: noteFoot }),
       ...(acting
         ? actions([centre, head], headHalf, wheelLoad === undefined ? '' : forceText(wheelLoad, units), push)
         : []),
@@ -141,13 +145,19 @@ const upright = (
   marks: readonly number[],
   metres: readonly number[],
   length: (metres: number) => string,
-  bottom: number,
+  [from, bottom]: readonly [number, number],
 ): readonly Item[] => {
   const texts = metres.map(length)
   const sizes = texts.map((text) => textWidth(text) + 1.2)
+  const total = sizes.reduce((sum, size) => sum + size, 0)
   const wanted = texts.map((_, i) => (marks[i]! + marks[i + 1]!) / 2)
   // Listed from below upward; on paper the uppermost comes first.
-  const centres = spread([...wanted].reverse(), [...sizes].reverse(), EDGE, bottom + 8)!.toReversed()
+  const centres = spread(
+    [...wanted].reverse(),
+    [...sizes].reverse(),
+    from,
+    Math.max(bottom, from) + total,
+  )!.toReversed()
   return [
     { item: 'line', points: marks.map((y): Point => [x, y]), role: 'dimension' },
     ...marks.map((y) => tick([x, y])),
@@ -183,7 +193,7 @@ const notesOf = (
   const { cap } = entry
   const capNote = (): readonly Note[] => {
     if (cap === undefined) return []
-    const name = cap.kind === 'channel' ? cap.channel.name : plate(cap.plate)
+    const name = cap.kind === 'channel' ? `${cap.channel.name}, ${length(cap.channel.d)} wide` : plate(cap.plate)
     const x = (cap.kind === 'channel' ? cap.channel.d : cap.plate.width) / 2
     return [{ at: [x, depth - section.cap.thickness / 2], texts: [`cap ${name}`, 'cap'] }]
   }
@@ -212,6 +222,9 @@ const notesOf = (
   return [...notes].sort((a, b) => b.at[1] - a.at[1])
 }
 
+/** From one line of the notes to the next, mm. */
+const NOTE = LINE + 0.7
+
 /** Notes in a column beside the section, each with a line that leads to what it speaks of. */
 const noteItems = (
   notes: readonly Note[],
@@ -226,7 +239,7 @@ const noteItems = (
   const { column, reach, width } = room
   const centres = spread(
     notes.map(({ at }) => at[1]),
-    notes.map(() => LINE + 0.7),
+    notes.map(() => NOTE),
     room.from,
     room.to,
   )
@@ -268,7 +281,7 @@ const actions = ([x, head]: Point, half: number, load: string, push: string): re
       ? []
       : [
           { item: 'arrow', from: [x - half - 11, y], to: [x - half, y], role: 'ink' } as const,
-          text([x - half - 1, y - 1.2], push, 'end'),
+          text([x - half - 1, y - 1.5], push, 'end'),
         ]),
   ]
 }

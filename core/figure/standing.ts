@@ -22,7 +22,7 @@ export interface Shown {
   /** Load per length of the whole span, and moments at its ends, sagging positive. Default: none. */
   readonly uniform?: NewtonPerMetre
   readonly ends?: readonly [left: NewtonMetre, right: NewtonMetre]
-  /** Default: `viewOf`. Figures of the same view and width have the same horizontal scale. */
+  /** Holds the extreme's whole span; default: `viewOf`. Figures of the same view and width have the same horizontal scale. */
   readonly view?: View
 }
 
@@ -88,10 +88,13 @@ export interface Scale {
   readonly across: (station: number) => number
 }
 
-/** Throws RangeError for a figure too narrow or a view of no length. */
-export const scaleOf = (view: View, width: number): Scale => {
+/** Throws RangeError for a figure too narrow or a view that does not hold the extreme's whole span. */
+export const scaleOf = (review: Review, extreme: Extreme, { view = viewOf(review, extreme), width }: Shown): Scale => {
   if (!(width >= LEAST_WIDTH && width < Infinity)) throw new RangeError(`a figure of ${width} mm`)
-  if (!(view.to > view.from)) throw new RangeError(`a view from ${view.from} to ${view.to} m`)
+  const { start, length } = spanOf(beamOf(review), extreme.span)
+  const near = 1e-9 * (start + length)
+  if (!(view.from <= start + near && view.to >= start + length - near && view.to - view.from < Infinity))
+    throw new RangeError(`a view from ${view.from} to ${view.to} m of a span from ${start} to ${start + length} m`)
   const perMetre = (width - 2 * SIDE) / (view.to - view.from)
   return { view, perMetre, across: (station) => SIDE + (station - view.from) * perMetre }
 }

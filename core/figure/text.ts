@@ -33,7 +33,7 @@ const GROUPS: readonly (readonly [signs: string, ems: number])[] = [
   ['abcdeghknopqsuvxyz0123456789−×+=', 0.6],
   ['ABCDEFGHJKLNOPQRSTUVXYZ', 0.71],
 ]
-const OTHER = 0.9
+const OTHER = 1
 
 /** From the baseline up to capitals and down to descenders, as parts of the size. */
 const ASCENT = 0.78

@@ -1,6 +1,9 @@
 /** One writer at a time, among all processes: a lock that the system itself takes back when its holder dies. */
 import Database from 'better-sqlite3'
 
+/** A connection that nothing refers to is closed by the garbage collector, and its lock would go with it. */
+const held = new Set<Database.Database>()
+
 export interface WriterLock {
   readonly release: () => void
 }
@@ -16,7 +19,12 @@ export const takeWriterLock = (record: string): WriterLock | undefined => {
     // Nothing is ever written, so nothing needs a journal beside it.
     lock.pragma('journal_mode = MEMORY')
     lock.exec('BEGIN EXCLUSIVE')
-    return { release: () => lock.close() }
+    held.add(lock)
+    const release = () => {
+      held.delete(lock)
+      lock.close()
+    }
+    return { release }
   } catch (error) {
     lock.close()
     if (error instanceof Database.SqliteError && error.code.startsWith('SQLITE_BUSY')) return undefined

@@ -49,7 +49,7 @@ export function entriesSlabs(pen: Pen, rows: readonly Entry[]): readonly Slab[] 
         draw: (_, top) => {
           const foot = top + tall - 1
           const dash = entry.isDefault ? [0.8, 1.8] : undefined
-          const colour = entry.isDefault ? COLOUR.grey : COLOUR.ink
+          const colour = COLOUR.grey
           if (to === count)
             artifact(pen, 'Layout', () => rule(pen, [valueX, foot], [valueX + valueWidth, foot], colour, 0.5, dash))
           table ??= openTag(pen, 'Table')

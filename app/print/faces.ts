@@ -25,15 +25,25 @@ export interface Faces {
   undrawn(text: string): readonly string[]
 }
 
-/** Path of a face's file. */
-export const faceFile = (file: FaceFile): string => createRequire(import.meta.url).resolve(FILES[file])
+/**
+ * Path of a face's file, by which documents know it too: the library reads a font anew at every use where one file goes by
+ * two names.
+ */
+export const faceFile = (file: FaceFile): string => PATHS[file]
 
-/** Registers the faces with a document. */
-export function registerFaces(doc: PDFKit.PDFDocument): Faces {
-  for (const file of Object.keys(FILES) as FaceFile[]) doc.registerFont(file, faceFile(file))
+const find = createRequire(import.meta.url).resolve
+const PATHS: Readonly<Record<FaceFile, string>> = {
+  regular: find(FILES.regular),
+  semibold: find(FILES.semibold),
+  regularSigns: find(FILES.regularSigns),
+  semiboldSigns: find(FILES.semiboldSigns),
+}
+
+/** The faces of a document. */
+export function facesOf(doc: PDFKit.PDFDocument): Faces {
   const known = new Map<string, FaceFile | undefined>()
   const has = (file: FaceFile, character: string): boolean => {
-    doc.font(file)
+    doc.font(faceFile(file))
     return fontOf(doc).hasGlyphForCodePoint(character.codePointAt(0)!)
   }
   /** Which file draws a character. */

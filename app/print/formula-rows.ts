@@ -11,32 +11,37 @@ export interface FormulaRow {
   readonly related: boolean
 }
 
+/** Width of the column for a row, in thousandths of an em: by whether it begins with a relation, and by its index. */
+export type RowWidth = (related: boolean, index: number) => number
+
 /**
- * Sets parts in rows, the first one no wider than `first`, the others no wider than `later` (thousandths of an em), broken
- * before relations first, then before plus and minus, then at products; a fraction, root or bracket that is wider than a
- * row is opened and broken inside.
+ * Sets parts in rows no wider than they may be, broken before relations first, then before plus and minus, then at products;
+ * a fraction, root or bracket that is wider than a row, or that would leave it mostly empty, is opened and broken inside.
  */
-export function formulaRows(parts: readonly Element[], first: number, later: number): readonly FormulaRow[] {
+export function formulaRows(parts: readonly Element[], widthOf: RowWidth): readonly FormulaRow[] {
   const rows: FormulaRow[] = []
   let rest = parts
   while (rest.length > 0) {
-    const width = rows.length === 0 ? first : later
+    const width = widthOf(rankOf(rest[0]!) === 0, rows.length)
     const drawing = set(rest)
     if (drawing.width <= width) return [...rows, rowOf(rest, drawing)]
     const cut = cutOf(rest, drawing, width)
-    if (cut === undefined) {
-      const opened = open(rest, drawing, width)
-      // One sign wider than the column: nothing can be broken, and the page scales it.
-      if (opened === undefined) return [...rows, rowOf(rest, drawing)]
+    const opened = cut === undefined || drawing.starts[cut]! < width * EMPTY ? open(rest, drawing, width) : undefined
+    if (opened) {
       rest = opened
       continue
     }
+    // One sign wider than the column: nothing can be broken, and the page scales it.
+    if (cut === undefined) return [...rows, rowOf(rest, drawing)]
     const head = rest.slice(0, cut)
     rows.push(rowOf(head, set(head)))
     rest = continued(rest.slice(cut))
   }
   return rows
 }
+
+/** A row filled less than this is mostly empty. */
+const EMPTY = 0.3
 
 const set = (parts: readonly Element[]): Drawing => {
   const text = mathOf(parts)
@@ -84,10 +89,15 @@ function rankOf(part: Element): number {
   return /^[×\u2062/]$/.test(part.text) ? 2 : Number.POSITIVE_INFINITY
 }
 
-/** What goes on in the next row: a product that shows no sign gets one, so that it is read as one. */
+/**
+ * What goes on in the next row: its first sign still stands between two parts, and a product that shows no sign gets one, so
+ * that it is read as one.
+ */
 function continued(parts: readonly Element[]): readonly Element[] {
   const [first, ...others] = parts
-  return first?.name === 'mo' && first.text === '\u2062' ? [leaf('mo', '×'), ...others] : parts
+  if (first === undefined) return parts
+  const sign = first.text === '\u2062' ? '×' : first.text
+  return [{ ...leaf('mo', sign), attributes: ' form="infix"' }, ...others]
 }
 
 /** The first part that can be opened at or before the column's edge, opened: its contents written in the row. */
@@ -124,20 +134,13 @@ function contents({ name, children }: Element): readonly Element[] | undefined {
 function grouped(parts: readonly Element[]): readonly Element[] {
   const inner = parts.length === 1 && parts[0]!.name === 'mrow' ? parts[0]!.children : parts
   if (inner.length === 1 && isLeaf(inner[0]!)) return inner
-  return inBrackets(inner) ? inner : [bracket('('), ...inner, bracket(')')]
+  return inBrackets(inner) ? inner : [leaf('mo', '('), ...inner, leaf('mo', ')')]
 }
 
 function raised(parts: readonly Element[], exponent: Element): readonly Element[] {
   const inner = grouped(parts)
   return [...inner.slice(0, -1), { name: 'msup', attributes: '', children: [inner.at(-1)!, exponent], text: '' }]
 }
-
-const bracket = (sign: '(' | ')'): Element => ({
-  name: 'mo',
-  attributes: ' stretchy="false"',
-  children: [],
-  text: sign,
-})
 
 const inBrackets = (parts: readonly Element[]): boolean => /^[([{]$/.test(parts[0]?.text ?? '') && closes(parts)
 

@@ -43,7 +43,8 @@ export function typeset(mathml: string): Drawing {
   if (failures.length > 0) throw new Error(`parts of the typeface of formulas did not load: ${failures.join(', ')}`)
   const [, top = 0, width = 0, height = 0] = numbers(attributeOf(adaptor, svg, 'viewBox'))
   const found: Found = { marks: [], lacking: [] }
-  walk(adaptor, svg, { scaleX: 1, scaleY: -1, x: 0, y: 0 }, found)
+  // The page of the library has y downward; its outermost group turns it round.
+  for (const child of svg.children) walk(adaptor, child, { scaleX: 1, scaleY: -1, x: 0, y: 0 }, found)
   return { width, ascent: -top, depth: height + top, ...found, starts: startsOf(adaptor, svg) }
 }
 
@@ -119,11 +120,7 @@ function walk(adaptor: LiteAdaptor, node: LiteNode, at: Place, found: Found): vo
       found.lacking.push(...Array.from(adaptor.textContent(node)))
       return
     case 'svg': {
-      // The outermost one has no place of its own; one inside is the stretched part of a bracket, cut at its edges.
-      if (at.scaleY === -1 && at.x === 0 && at.y === 0 && found.marks.length === 0 && node.parent.kind !== 'g') {
-        within({ scaleX: 1, scaleY: 1, x: 0, y: 0 })
-        return
-      }
+      // The stretched part of a bracket, cut at its edges.
       const [left = 0, top = 0, width = 0, height = 0] = numbers(attributeOf(adaptor, node, 'viewBox'))
       const corner = moved(place, `translate(${attribute('x')},${attribute('y')})`)
       const clip: Box = [corner.x, corner.y, width * corner.scaleX, height * corner.scaleY]

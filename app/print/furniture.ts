@@ -1,7 +1,7 @@
 /** What stands on every page: the title block at its head, program, fingerprint and caution at its foot. */
 import type { Sheet } from '../../core/sheet/types.ts'
 import { COLOUR, STYLE } from './hand.ts'
-import { artifact, box, rise, rule, write, writeLines, type Pen } from './pen.ts'
+import { artifact, box, rise, rule, write, writeEnd, writeLines, type Pen } from './pen.ts'
 import { wrap, wrapAtMost } from './text.ts'
 
 export interface Furniture {
@@ -14,7 +14,7 @@ export interface Furniture {
 
 /** Lines of a name in the title block; a longer one ends with an ellipsis and stands whole in the file's properties. */
 const MOST_LINES = 8
-const PAD = 6
+const PAD = 5.5
 const BELOW_TITLE = 22
 const ABOVE_FOOT = 14
 
@@ -46,12 +46,12 @@ interface Field {
 function titleBlock(pen: Pen, { title }: Sheet) {
   const { left, right, top } = pen.frame
   const fields: readonly Field[] = [
-    { label: 'PROJECT', text: title.project, share: 27 },
-    { label: 'SUBJECT', text: title.subject, share: 27 },
-    { label: 'NUMBER / REV', text: joined(title.number, title.revision, ' / '), share: 14 },
-    { label: 'BY · CHECKED', text: `${name(title.preparedBy)} · ${name(title.checkedBy)}`, share: 15 },
-    ...(title.date === '' ? [] : [{ label: 'DATE', text: title.date, share: 11 }]),
-    { label: 'PAGE', text: '', share: 10 },
+    { label: 'PROJECT', text: title.project, share: 25.5 },
+    { label: 'SUBJECT', text: title.subject, share: 25.5 },
+    { label: 'NUMBER / REV', text: joined(title.number, title.revision, '\u00a0/\u00a0'), share: 14.5 },
+    { label: 'BY · CHECKED', text: `${name(title.preparedBy)} ·\u00a0${name(title.checkedBy)}`, share: 17 },
+    ...(title.date === '' ? [] : [{ label: 'DATE', text: title.date, share: 13 }]),
+    { label: 'PAGE', text: '', share: 9 },
   ]
   const whole = fields.reduce((sum, { share }) => sum + share, 0)
   let x = left
@@ -86,22 +86,22 @@ function footOf(pen: Pen, sheet: Sheet) {
   const { left, right, bottom } = pen.frame
   const style = STYLE.foot
   const width = right - left
-  const record = [sheet.program, sheet.basis].filter((word) => word !== '').join(' · ')
-  const caution = wrap(pen, sheet.caution, style, width * 0.42)
-  const own = [
-    ...wrap(pen, record, style, width * 0.54),
-    ...wrap(pen, `fingerprint ${inFours(sheet.fingerprint)}`, style, width * 0.54),
-  ]
-  const mark = sheet.kept ? [] : [NOT_KEPT]
-  const count = Math.max(own.length + mark.length, caution.length)
-  const top = bottom - count * style.leading - 5
+  const words = (text: string, share: number): readonly string[] => wrap(pen, text, style, width * share)
+  const record = words(joined(sheet.program, sheet.basis, ' · '), 0.48)
+  const caution = words(sheet.caution, 0.48)
+  const mark = sheet.kept ? '' : NOT_KEPT
+  const fingerprint = words(`fingerprint ${inFours(sheet.fingerprint)}`, 0.8)
+  const above = Math.max(record.length, caution.length)
+  const top = bottom - (above + fingerprint.length) * style.leading - 5
   return {
     top,
     draw: () => {
       rule(pen, [left, top], [right, top], COLOUR.ink, 0.8)
-      writeLines(pen, own, style, left, top + 4)
-      writeLines(pen, mark, STYLE.footStrong, left, top + 4 + own.length * style.leading)
-      writeLines(pen, caution, style, left + width * 0.58, top + 4)
+      const [first, second] = [top + 4, top + 4 + above * style.leading]
+      writeLines(pen, record, style, left, first)
+      caution.forEach((line, index) => writeEnd(pen, line, style, right, first + index * style.leading + rise(style)))
+      writeLines(pen, fingerprint, style, left, second)
+      writeEnd(pen, mark, STYLE.footStrong, right, second + rise(style))
     },
   }
 }

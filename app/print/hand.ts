@@ -64,7 +64,7 @@ export const STYLE = {
   footStrong: style('semibold', 7, 9, COLOUR.accent),
   title: style('regular', 9, 11.4),
   /** Small letterspaced capitals over what they name. */
-  label: { ...style('regular', 6.2, 8, COLOUR.grey), spacing: 0.7 },
+  label: { ...style('regular', 6.2, 8, COLOUR.grey), spacing: 0.5 },
 } as const
 
 /** Formulas: the size of their letters. Their smallest scripts stand at half of it. */

@@ -1,5 +1,5 @@
 /** What blocks are measured and drawn with: words, rules, boxes, hatches, tags. Lengths in points, y downward. */
-import type { Faces } from './faces.ts'
+import { faceFile, type Faces } from './faces.ts'
 import type { Frame, Style } from './hand.ts'
 
 export interface Pen {
@@ -16,7 +16,7 @@ export interface Pen {
 export function widthOf(pen: Pen, text: string, style: Style): number {
   let width = (style.spacing ?? 0) * Array.from(text).length
   for (const run of pen.faces.runs(text, style.face))
-    width += pen.doc.font(run.file).fontSize(style.size).widthOfString(run.text)
+    width += pen.doc.font(faceFile(run.file)).fontSize(style.size).widthOfString(run.text)
   return width
 }
 
@@ -26,7 +26,7 @@ export function write(pen: Pen, text: string, style: Style, x: number, baseline:
   doc.fillColor(style.colour)
   let at = x
   for (const run of pen.faces.runs(text, style.face)) {
-    doc.font(run.file).fontSize(style.size)
+    doc.font(faceFile(run.file)).fontSize(style.size)
     const spacing = style.spacing ?? 0
     doc.text(run.text, at, baseline, {
       lineBreak: false,
@@ -37,16 +37,20 @@ export function write(pen: Pen, text: string, style: Style, x: number, baseline:
   }
 }
 
-/** Words that end at x. */
+/** Lines of one text, each but the last with the space that was broken at, so that their words do not run together. */
+export const spaced = (lines: readonly string[]): readonly string[] =>
+  lines.map((line, index) => (index < lines.length - 1 ? `${line} ` : line))
+
+/** Words that end at x; a space behind them does not count. */
 export const writeEnd = (pen: Pen, text: string, style: Style, x: number, baseline: number): void =>
-  write(pen, text, style, x - widthOf(pen, text, style), baseline)
+  write(pen, text, style, x - widthOf(pen, text.trimEnd(), style), baseline)
 
 /** Where the first baseline stands below the upper edge of a line, so that the letters stand in its middle. */
 export const rise = (style: Style): number => style.leading / 2 + style.size * 0.35
 
 /** Lines, one below another, from the upper edge `top` on. */
 export function writeLines(pen: Pen, lines: readonly string[], style: Style, x: number, top: number): void {
-  lines.forEach((line, index) => write(pen, line, style, x, top + index * style.leading + rise(style)))
+  spaced(lines).forEach((line, index) => write(pen, line, style, x, top + index * style.leading + rise(style)))
 }
 
 /** A straight rule. */
@@ -140,9 +144,37 @@ export function artifact(pen: Pen, type: 'Pagination' | 'Layout', draw: () => vo
   pen.doc.endMarkedContent()
 }
 
-/** Draws what stands for `text` where it is read, searched or copied. */
-export function standingFor(pen: Pen, text: string, draw: () => void): void {
-  pen.doc.markContent('Span', { actual: text })
-  draw()
-  pen.doc.endMarkedContent()
+/** A stretch of the page that is read, searched and copied as a text, whatever is drawn there. */
+export interface ReadAs {
+  readonly text: string
+  readonly x: number
+  readonly baseline: number
+  readonly width: number
+  readonly size: number
+}
+
+/**
+ * Lays a glyph that leaves no ink over a place, as wide as the place, and says what it is read as. Readers take place and
+ * direction of the words from the text's own state, so the mark begins and ends inside of the text.
+ */
+export function readAs(pen: Pen, { text, x, baseline, width, size }: ReadAs): void {
+  const { doc } = pen
+  doc.font(faceFile('regular')).fontSize(size)
+  const { _font: font } = doc as unknown as { _font: EmbeddedFont }
+  const fonts = doc.page.fonts as Record<string, PDFKit.PDFKitReference>
+  fonts[font.id] ??= font.ref()
+  const number = (value: number): string => `${Math.round(value * 1000) / 1000}`
+  doc.save().transform(1, 0, 0, -1, 0, doc.page.height).addContent('BT')
+  doc.addContent(`1 0 0 1 ${number(x)} ${number(doc.page.height - baseline)} Tm`)
+  doc.addContent(`/${font.id} ${number(size)} Tf ${number((100 * width) / doc.widthOfString(' '))} Tz`)
+  doc.markContent('Span', { actual: text })
+  doc.addContent(`<${font.encode(' ')[0].join('')}> Tj`)
+  doc.endMarkedContent().addContent('ET').restore()
+}
+
+/** What the library keeps to itself of a font. */
+interface EmbeddedFont {
+  readonly id: string
+  ref(): PDFKit.PDFKitReference
+  encode(text: string): readonly [codes: readonly string[], positions: unknown]
 }

@@ -3,7 +3,7 @@ import PDFDocument from 'pdfkit'
 import type { Block, Sheet } from '../../core/sheet/types.ts'
 import { glyphForms } from './draw-formula.ts'
 import { entriesSlabs } from './entries.ts'
-import { faceFile, registerFaces } from './faces.ts'
+import { faceFile, facesOf } from './faces.ts'
 import { figureSlab, sealSlab } from './figure.ts'
 import { flow, type Slab } from './flow.ts'
 import { furnitureOf } from './furniture.ts'
@@ -37,7 +37,7 @@ export async function printSheet(sheet: Sheet, paper: Paper, options: PrintOptio
   await step(0)
 
   const furniture = furnitureOf(pen, sheet)
-  const outline = outliner(doc, furniture.top)
+  const outline = outliner(doc)
   const slabs: Slab[] = []
   /** Index of the first slab after each block. */
   const ends: number[] = []
@@ -48,7 +48,7 @@ export async function printSheet(sheet: Sheet, paper: Paper, options: PrintOptio
       slabs.push(...workingSlabs(pen, block.lines, next))
       ends.push(slabs.length)
       index += 1
-    } else slabs.push(...slabsOf(pen, block, outline))
+    } else slabs.push(...slabsOf(pen, block, outline, sheet.blocks[index - 1]))
     ends.push(slabs.length)
     await step(index + 1)
   }
@@ -70,10 +70,10 @@ export async function printSheet(sheet: Sheet, paper: Paper, options: PrintOptio
   return bytesOf(doc)
 }
 
-function slabsOf(pen: Pen, block: Block, outline: Outline): readonly Slab[] {
+function slabsOf(pen: Pen, block: Block, outline: Outline, before: Block | undefined): readonly Slab[] {
   switch (block.block) {
     case 'heading':
-      return [headingSlab(pen, block, outline)]
+      return [headingSlab(pen, block, outline, before?.block === 'heading')]
     case 'paragraph':
       return paragraphSlabs(pen, block)
     case 'table':
@@ -115,7 +115,7 @@ function newDocument(sheet: Sheet, paper: Paper): { readonly doc: PDFKit.PDFDocu
   })
   const root = doc.struct('Document')
   doc.addStructure(root)
-  return { doc, pen: { doc, faces: registerFaces(doc), frame, root, glyph: glyphForms(doc) } }
+  return { doc, pen: { doc, faces: facesOf(doc), frame, root, glyph: glyphForms(doc) } }
 }
 
 const joined = (words: readonly string[], between: string): string => words.filter((word) => word !== '').join(between)
@@ -138,7 +138,7 @@ function dateOf(date: string): Date {
 type Outline = (level: 1 | 2 | 3, title: string, top: number) => void
 
 /** Bookmarks, each under the last one of a higher level. */
-function outliner(doc: PDFKit.PDFDocument, _top: number): Outline {
+function outliner(doc: PDFKit.PDFDocument): Outline {
   const open: { level: number; item: PDFKit.PDFOutline }[] = []
   return (level, title, top) => {
     while (open.length > 0 && open.at(-1)!.level >= level) open.pop()

@@ -1,7 +1,7 @@
 /** Headings, paragraphs and the clause column beside them. */
 import type { Slab } from './flow.ts'
 import { COLOUR, STYLE, type Style } from './hand.ts'
-import { artifact, openTag, rule, widthOf, write, writeLines, rise, type Pen, type Tag } from './pen.ts'
+import { artifact, openTag, rule, spaced, widthOf, write, writeLines, rise, type Pen, type Tag } from './pen.ts'
 import { wrap } from './text.ts'
 
 /** A heading, with its number and its entry in the outline. */
@@ -9,6 +9,7 @@ export function headingSlab(
   pen: Pen,
   { level, number, text }: { readonly level: 1 | 2 | 3; readonly number: string; readonly text: string },
   outline: (level: 1 | 2 | 3, title: string, top: number) => void,
+  afterHeading: boolean,
 ): Slab {
   const style = STYLE[`h${level}`]
   const indent = number === '' ? 0 : widthOf(pen, `${number}  `, style)
@@ -17,13 +18,13 @@ export function headingSlab(
   const below = [5, 3, 2][level - 1]!
   return {
     height: lines.length * style.leading + below,
-    gap: [24, 18, 11][level - 1]!,
+    gap: afterHeading ? 7 : [26, 20, 13][level - 1]!,
     keep: true,
     draw: (_, top) => {
       outline(level, `${number} ${text}`.trim(), top)
       const tag = openTag(pen, `H${level}`)
       tag.draw(() => {
-        if (number !== '') write(pen, number, style, left, top + rise(style))
+        if (number !== '') write(pen, `${number} `, style, left, top + rise(style))
         writeLines(pen, lines, style, left + indent, top)
       })
       tag.end()
@@ -61,7 +62,8 @@ export function paragraphSlabs(
             rule(pen, [left + 1.5, top], [left + 1.5, top + style.leading], COLOUR.accent, 2),
           )
         tag ??= openTag(pen, 'P')
-        if (line !== '') tag.draw(() => write(pen, line, style, left + indent, top + rise(style)))
+        const words = spaced(lines)[index]!
+        if (line !== '') tag.draw(() => write(pen, words, style, left + indent, top + rise(style)))
         if (index === 0) beside?.draw(top, Math.max(beside.height, style.leading))
         if (last) tag.end()
       },

@@ -8,6 +8,7 @@ import {
   openTag,
   rise,
   rule,
+  spaced,
   widthOf,
   write,
   writeEnd,
@@ -131,7 +132,7 @@ function writeAligned(
   { column, x, width }: Place,
   top: number,
 ): void {
-  lines.forEach((line, index) => {
+  spaced(lines).forEach((line, index) => {
     const baseline = top + index * style.leading + rise(style)
     if (column.align === 'left') write(pen, line, style, x, baseline)
     else writeEnd(pen, line, style, x + width, baseline)
@@ -197,7 +198,8 @@ function utilisationContent(pen: Pen, { utilisation, word }: Exclude<Cell, strin
   const colour = over ? COLOUR.accent : COLOUR.ink
   const style = { ...(over ? STYLE.cellStrong : STYLE.cell), colour }
   const wide = widthOf(pen, word, style)
-  const bar = Math.min(70, place.width - FIGURE_WIDTH)
+  // Alike in every row, so that they can be compared; a short word has room behind them.
+  const bar = Math.min(70, Math.max(40, place.width - FIGURE_WIDTH - 36))
   const beside = utilisation !== null && word !== '' && place.width >= bar + FIGURE_WIDTH + 6 + wide
   const words = word === '' || beside ? [] : wrap(pen, word, style, place.width)
   const first = utilisation === null ? 0 : 1
@@ -211,7 +213,7 @@ function utilisationContent(pen: Pen, { utilisation, word }: Exclude<Cell, strin
       drawBar(pen, utilisation, place.x, top + style.leading / 2, bar)
       const baseline = top + rise(style)
       writeEnd(pen, utilisationText(utilisation), style, place.x + bar + FIGURE_WIDTH, baseline)
-      if (beside) write(pen, word, style, place.x + bar + FIGURE_WIDTH + 6, baseline)
+      if (beside) write(pen, ` ${word}`, style, place.x + bar + FIGURE_WIDTH + 6 - widthOf(pen, ' ', style), baseline)
     },
   }
 }

@@ -27,7 +27,7 @@ function wrapParagraph(pen: Pen, text: string, style: Style, width: number): str
   let line = ''
   let used = 0
   const space = widthOf(pen, ' ', style)
-  for (const word of text.split(' ')) {
+  for (const word of wordsOf(text)) {
     const wide = widthOf(pen, word, style)
     if (line !== '' && used + space + wide <= width) {
       line += ` ${word}`
@@ -42,6 +42,19 @@ function wrapParagraph(pen: Pen, text: string, style: Style, width: number): str
   }
   return [...lines, line].map((each) => each.trimEnd())
 }
+
+/** Words between spaces; a figure and its unit are one. */
+function wordsOf(text: string): string[] {
+  const words: string[] = []
+  for (const word of text.split(' ')) {
+    const before = words.at(-1)
+    if (before !== undefined && /\d$/.test(before) && UNIT.test(word)) words[words.length - 1] = `${before} ${word}`
+    else words.push(word)
+  }
+  return words
+}
+
+const UNIT = /^(%|ft|in|kip|kips|ksi|ton|t|lb|mm|m|kN|MPa|(kip|kN|N|lb)[-·/](ft|in|m|mm))[.,;:)]*$/
 
 /** A word wider than a line, in parts: after a hyphen, a slash or a dot where there is one far enough along, else anywhere. */
 function broken(pen: Pen, word: string, style: Style, width: number): string[] {

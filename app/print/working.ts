@@ -5,7 +5,7 @@ import type { Slab } from './flow.ts'
 import { formulaRows, type FormulaRow } from './formula-rows.ts'
 import { COLOUR, FORMULA_SIZE, STYLE, type Style } from './hand.ts'
 import { leaf, partsOf, type Element } from './mathml.ts'
-import { box, openTag, rise, standingFor, widthOf, write, writeLines, type Pen, type Tag } from './pen.ts'
+import { box, openTag, readAs, rise, widthOf, writeLines, type Pen, type Tag } from './pen.ts'
 import { clauseBeside } from './prose.ts'
 import { wrap } from './text.ts'
 
@@ -18,12 +18,12 @@ export interface Verdict {
 /** The lines of a working; a verdict that follows stands behind the last one where there is room, else below. */
 export const workingSlabs = (pen: Pen, lines: readonly Line[], verdict?: Verdict): readonly Slab[] =>
   lines.flatMap((line, index) =>
-    lineSlabs(pen, line, index === 0 ? 3 : 5, index === lines.length - 1 ? verdict : undefined),
+    lineSlabs(pen, line, index === 0 ? 4 : 8, index === lines.length - 1 ? verdict : undefined),
   )
 
 /** A verdict by itself. */
-export function verdictSlab(pen: Pen, verdict: Verdict): Slab {
-  const x = pen.frame.left + INDENT
+export function verdictSlab(pen: Pen, verdict: Verdict, indent = 0): Slab {
+  const x = pen.frame.left + indent
   const { height, draw } = verdictBox(pen, verdict, pen.frame.body - x)
   return {
     height,
@@ -40,7 +40,7 @@ export function verdictSlab(pen: Pen, verdict: Verdict): Slab {
 const INDENT = 10
 /** Rows that go on stand under the first relation, unless it is as far out as this share of the column. */
 const FAR_OUT = 0.35
-const ROW_GAP = 5
+const ROW_GAP = 7
 
 function lineSlabs(pen: Pen, line: Line, gap: number, verdict: Verdict | undefined): readonly Slab[] {
   const room = pen.frame.body - pen.frame.left - INDENT
@@ -65,7 +65,7 @@ function lineSlabs(pen: Pen, line: Line, gap: number, verdict: Verdict | undefin
     const boxed = verdictBox(pen, verdict, room)
     const last = pieces.at(-1)
     if (last && boxed.width + 16 <= free) pieces[pieces.length - 1] = sideBySide(last, verdictPiece(boxed), 16)
-    else below = verdictSlab(pen, verdict)
+    else below = verdictSlab(pen, verdict, INDENT)
   }
   return [...stacked(pen, line, pieces, gap, beside, below !== undefined), ...(below ? [below] : [])]
 }
@@ -76,6 +76,8 @@ interface Piece {
   readonly depth: number
   /** Its right edge, measured from the line's left. */
   readonly right: number
+  /** The right edge of its formula. */
+  readonly inked: number
   readonly draw: (x: number, baseline: number) => void
   readonly kind: 'formula' | 'words'
 }
@@ -108,7 +110,8 @@ function stacked(
         tag ??= openTag(pen, isFormula ? 'Formula' : 'P', isFormula ? { alt: line.text } : {})
         tag.draw(() => {
           // All of the line is read where its first row stands.
-          if (index === 0 && isFormula) standingFor(pen, formulaText(line), () => space(pen, x, baseline))
+          if (index === 0 && isFormula)
+            readAs(pen, { text: formulaText(line), x, baseline, width: piece.inked, size: FORMULA_SIZE })
           piece.draw(x, baseline)
         })
         if (index === 0) beside?.draw(top, Math.max(heights[0]! + pad * 2, beside.height))
@@ -117,9 +120,6 @@ function stacked(
     }
   })
 }
-
-/** A glyph that leaves no ink, for what a reader is told stands here. */
-const space = (pen: Pen, x: number, baseline: number): void => write(pen, '\u00a0', STYLE.plain, x, baseline)
 
 /** The line's plain text without the note, which is drawn as words. */
 const formulaText = ({ text, note }: Line): string =>
@@ -144,14 +144,14 @@ function rowsOf(line: Line, room: number): readonly Row[] {
   if (symbols.length + values.length === 0) return []
   const width = (room * 1000) / FORMULA_SIZE
   const between = symbols.length > 0 && values.length > 0 && !goesOn(values) ? [COLON, GAP] : []
-  const [whole] = formulaRows([...symbols, ...between, ...values], Number.POSITIVE_INFINITY, 0)
+  const [whole] = formulaRows([...symbols, ...between, ...values], () => Number.POSITIVE_INFINITY)
   if (whole!.drawing.width <= width) return [{ ...whole!, x: 0 }]
   const relation = whole!.relation ?? 0
   const indent = symbols.length > 0 && relation < width * FAR_OUT ? relation : 1500
-  const later = width - indent - BEHIND
+  const later = (related: boolean): number => width - indent - (related ? 0 : BEHIND)
   const rows = [
-    ...formulaRows(symbols, width, later),
-    ...formulaRows(values, symbols.length > 0 ? later : width, later),
+    ...formulaRows(symbols, (related, index) => (index === 0 ? width : later(related))),
+    ...formulaRows(values, (related, index) => (symbols.length === 0 && index === 0 ? width : later(related))),
   ]
   return rows.map((row, index) => {
     const [begins = 0] = row.drawing.starts
@@ -174,6 +174,7 @@ function formulaPiece(pen: Pen, { drawing, x }: Row): Piece {
     ascent: Math.max(drawing.ascent * scale, FORMULA_SIZE * 0.75),
     depth: Math.max(drawing.depth * scale, FORMULA_SIZE * 0.25),
     right: x + drawing.width * scale,
+    inked: x + drawing.width * scale,
     draw: (left, baseline) => drawFormula(pen, drawing, left + x, baseline, size),
     kind: 'formula',
   }
@@ -196,6 +197,7 @@ function notePiece(
       ascent: first,
       depth: lines.length * style.leading - first,
       right: Math.max(...lines.map((line) => widthOf(pen, line, style))),
+      inked: 0,
       draw: (x, baseline) => writeLines(pen, lines, style, x, baseline - first),
       kind: 'words',
     },
@@ -206,6 +208,7 @@ const sideBySide = (left: Piece, right: Piece, between: number): Piece => ({
   ascent: Math.max(left.ascent, right.ascent),
   depth: Math.max(left.depth, right.depth),
   right: left.right + between + right.right,
+  inked: left.inked,
   draw: (x, baseline) => {
     left.draw(x, baseline)
     right.draw(x + left.right + between, baseline)
@@ -245,6 +248,7 @@ function verdictPiece({ width, height, draw }: Boxed): Piece {
     ascent,
     depth: height - ascent,
     right: width,
+    inked: 0,
     draw: (x, baseline) => draw(x, baseline - ascent),
     kind: 'words',
   }

@@ -63,6 +63,11 @@ export type Comparison = '<=' | '<' | '>=' | '>'
 /** A figure with its symbol, kind and SI value. */
 export type Figure = readonly [symbol: string, kind: Kind, value: number]
 
+/** A derivation, step by step. Written out by writeWorking (write.ts). */
+export interface Working {
+  readonly steps: readonly Step[]
+}
+
 /** One step of a working: references only, written out when it is to be shown. */
 export type Step =
   | { readonly step: 'rule'; readonly rule: Rule; readonly values: Numbers; readonly result: number }
@@ -82,6 +87,8 @@ export type Step =
       readonly figures: readonly Figure[]
       readonly clause: Clause | undefined
     }
+  /** Another derivation used here, with what it came to: written in full, or told by its result where it stands already. */
+  | { readonly step: 'part'; readonly working: Working; readonly figure: Figure; readonly name: string }
   | {
       readonly step: 'iteration'
       readonly figure: Figure

@@ -2,12 +2,18 @@
 import type { Kind, KindValue, Quantity } from '../quantity/kinds.ts'
 import { citation, type Clause } from '../sources/clause.ts'
 import { TESTS } from './compile.ts'
-import { FormulaError, type Comparison, type Figure, type Rule, type Step, type Values, type Where } from './types.ts'
+import {
+  FormulaError,
+  type Comparison,
+  type Figure,
+  type Rule,
+  type Step,
+  type Values,
+  type Where,
+  type Working,
+} from './types.ts'
 
-/** A derivation, step by step. Written out by writeWorking (write.ts). */
-export interface Working {
-  readonly steps: readonly Step[]
-}
+export type { Working } from './types.ts'
 
 export interface WorkingRecorder extends Working {
   /** Computes a formula or cases and keeps both. The values must not be changed afterwards. Throws FormulaError. */
@@ -29,8 +35,8 @@ export interface WorkingRecorder extends Working {
     evaluations: number,
     note: string,
   ): KindValue[K]
-  /** Appends the steps of another derivation. */
-  include(other: Working): void
+  /** Another derivation, with what it came to and its name: "strong-axis strength". */
+  include(other: Working, figure: Figure, name: string): void
 }
 
 /** An empty derivation. Every figure entered must be finite; FormulaError names the one that is not. */
@@ -65,8 +71,8 @@ export function working(): WorkingRecorder {
       steps.push({ step: 'iteration', figure: finite([symbol, kind, root]), residual, evaluations, note })
       return root
     },
-    include: (other) => {
-      steps.push(...other.steps)
+    include: (other, figure, name) => {
+      steps.push({ step: 'part', working: other, figure: finite(figure), name })
     },
   }
 }

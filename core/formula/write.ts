@@ -64,6 +64,8 @@ function linesOf(step: Step, system: UnitSystem): Line[] {
       return step.rule.rule === 'formula'
         ? [formulaLine(step.rule, step.values, step.result, system)]
         : casesLines(step.rule, step.values, step.result, system)
+    case 'part':
+      return writeWorking(step.working, system)
     case 'given':
       return [line('given', step.clause, (script) => figureParts(step.figure, script, system), step.note)]
     case 'note':

@@ -38,7 +38,7 @@ export function sheetOf(review: Review, units: UnitSystem, revision?: RevisionMa
       date: revision?.date ?? project.date ?? '',
     },
     units,
-    program: review.program,
+    program: `Longtravel ${review.program}`,
     fingerprint,
     basis: `${basis.method}, ${units === 'us' ? 'US' : 'SI'} units`,
     kept: revision !== undefined,

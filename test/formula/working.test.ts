@@ -210,13 +210,12 @@ describe('a recorder', () => {
     expect(writeWorking(on, 'us').at(-1)!.text).toBe('a = 2 <= b = 2   not satisfied')
   })
 
-  it('includes the steps of another', () => {
+  it('includes another derivation, as it stands when it is written', () => {
     const on = working()
     on.note('before')
     const other = working()
     other.note('inside')
-    on.include(other)
-    other.note('too late')
+    on.include(other, ['M_n', 'moment', as('moment', 1)], 'strength')
     expect(writeWorking(on, 'us').map((line) => line.text)).toEqual(['before', 'inside'])
   })
 

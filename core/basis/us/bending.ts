@@ -6,7 +6,6 @@ import type { Ask, Plan, Subject, Verdict } from '../types.ts'
 import { BIAXIAL, biaxialAsks, BOTTOM, bottomAsks, compressionVerdict } from './both-axes.ts'
 import { compressiveStrength } from './compression.ts'
 import type { Design } from './design.ts'
-import { topFlangeStrength } from './flange.ts'
 import { availableFlexure, flexuralStrength } from './flexure.ts'
 import { ask, demandOf, judge } from './judgement.ts'
 import { momentByStatics } from './standing.ts'
@@ -51,7 +50,7 @@ export function bendingOf(design: Design, span: number): Plan {
 const longest = (a: Metre, b: Metre): Metre => (a >= b ? a : b)
 
 function lateralAsks(design: Design, span: number): readonly Ask[] {
-  const top = topFlangeStrength(design.section, design.steel)
+  const top = design.topFlange
   return design.loadings.flatMap((loading) => {
     if (loading.train === undefined) return []
     const term: MomentTerm = { factor: 1, at: 'worst', wheels: loading.top, uniform: as('lineLoad', 0), ends: NO_ENDS }
@@ -60,7 +59,7 @@ function lateralAsks(design: Design, span: number): readonly Ask[] {
       const found = place.terms[0]!
       const M_ry = on.given('M_ry', 'moment', found.value, 'greatest moment of the top flange sideways')
       momentByStatics(design, place, term, found.station, on)
-      on.include(top.working)
+      on.include(top.working, ['M_n', 'moment', top.M_n], 'strength of the top flange sideways')
       return judge(on, 'moment', ['M_ry', M_ry], ['M_cy', availableFlexure(on, design.job.basis.method, top.M_n)])
     })
   })

@@ -6,7 +6,6 @@ import type { MomentTerm } from '../../travel/types.ts'
 import type { Ask, Judgement, Subject, Verdict } from '../types.ts'
 import { availableCompression, type CompressiveStrength } from './compression.ts'
 import type { Design, Loading } from './design.ts'
-import { bottomFlangeStrength, topFlangeStrength } from './flange.ts'
 import { availableFlexure } from './flexure.ts'
 import { ask, demandOf, judge, judgeSum } from './judgement.ts'
 import { momentByStatics } from './standing.ts'
@@ -105,7 +104,7 @@ export function biaxialAsks(axis: StrongAxis, axial: CompressiveStrength, loadin
     }
   }
   const inBending = momentFactor(P_r, P_c)
-  const top = topFlangeStrength(design.section, design.steel)
+  const top = design.topFlange
   const M_cy = availableFlexure(unrecorded, method, top.M_n)
   const sideways: MomentTerm = {
     factor: (inBending * A_8_3.value(y)) / M_cy,
@@ -133,9 +132,9 @@ export function biaxialAsks(axis: StrongAxis, axial: CompressiveStrength, loadin
         const M_y = on.given('M_y', 'moment', last.value, 'greatest moment of the top flange sideways')
         momentByStatics(design, place, sideways, last.station, on)
         const M_cx = availableFlexure(on, method, strengthAt(axis, place, strong, M_x, on))
-        on.include(top.working)
+        on.include(top.working, ['M_n', 'moment', top.M_n], 'strength of the top flange sideways')
         availableFlexure(on, method, top.M_n)
-        on.include(axial.working)
+        on.include(axial.working, ['P_n', 'force', axial.P_n], 'axial strength')
         availableCompression(on, method, axial.P_n)
         const M_rx = P_r === 0 ? M_x : on.take(M_RX, { B_1: on.take(A_8_3, x), M_nt: M_x })
         const M_ry = P_r === 0 ? M_y : on.take(M_RY, { B_1: on.take(A_8_3, y), M_nt: M_y })
@@ -157,7 +156,7 @@ export function bottomAsks(axis: StrongAxis, loading: Loading): readonly Ask[] {
   const { design, span, strength } = axis
   if (loading.train === undefined) return []
   const { method } = design.job.basis
-  const flange = bottomFlangeStrength(design.section, design.steel)
+  const flange = design.bottomFlange
   const M_cx = availableFlexure(unrecorded, method, strength.bottomYield)
   const M_cy = availableFlexure(unrecorded, method, flange.M_n)
   const yields = { F_y: design.steel.F_y, A_g: design.section.A }
@@ -184,7 +183,7 @@ export function bottomAsks(axis: StrongAxis, loading: Loading): readonly Ask[] {
       momentByStatics(design, place, sideways, couple!.station, on)
       on.given('M_n', 'moment', strength.bottomYield, `yielding at the bottom flange, ${strength.section}`)
       availableFlexure(on, method, strength.bottomYield)
-      on.include(flange.working)
+      on.include(flange.working, ['M_n', 'moment', flange.M_n], 'strength of the bottom flange sideways')
       availableFlexure(on, method, flange.M_n)
       availableCompression(on, method, on.take(D2_1, yields))
       return judgeSum(on, on.take(H1_1, { P_r, P_c, M_rx, M_cx, M_ry, M_cy }))
@@ -202,7 +201,7 @@ export function compressionVerdict(design: Design, axial: CompressiveStrength): 
   const { longitudinal, set } = loaded.reduce((a, b) => (b.longitudinal > a.longitudinal ? b : a))
   const decide = (on: WorkingRecorder): Judgement => {
     const P_r = on.given('P_r', 'force', longitudinal, `longitudinal force with its load factor, ${set}`)
-    on.include(axial.working)
+    on.include(axial.working, ['P_n', 'force', axial.P_n], 'axial strength')
     return judge(on, 'force', ['P_r', P_r], ['P_c', availableCompression(on, method, axial.P_n)])
   }
   return { ...COMPRESSION, ...statusOf(decide), why: '', judge: decide }

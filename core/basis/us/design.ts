@@ -7,7 +7,14 @@ import type { Job } from '../../job/types.ts'
 import { as, STANDARD_GRAVITY, type Metre, type Newton, type NewtonPerMetre } from '../../quantity/kinds.ts'
 import type { Section } from '../../section/types.ts'
 import { combinationsOf, setsOfCranes, type Combination, type Share, type Together } from './combinations.ts'
-import { flangeForces, leverArm, type FlangeForces } from './flange.ts'
+import {
+  bottomFlangeStrength,
+  flangeForces,
+  leverArm,
+  topFlangeStrength,
+  type FlangeForces,
+  type FlangeStrength,
+} from './flange.ts'
 import type { Steel } from './flexure.ts'
 import { craneForces, type CraneForces } from './forces.ts'
 
@@ -26,6 +33,9 @@ export interface Design {
   readonly railArm: Metre
   readonly eccentricity: Metre
   readonly headAboveCentroid: Metre
+  /** Strength of the two flanges about the vertical axis. */
+  readonly topFlange: FlangeStrength
+  readonly bottomFlange: FlangeStrength
   readonly loadings: readonly Loading[]
   readonly cautions: readonly string[]
 }
@@ -93,16 +103,19 @@ export const designOf = (
   const eccentricity = runway.rail.eccentricity ?? as('length', 0.75 * section.tw)
   const steels = [girder.steel, girder.capSteel, girder.plateSteel].filter((steel) => steel !== undefined)
   const weakest = steels.reduce((a, b) => (b.fy < a.fy ? b : a))
+  const steel = { F_y: weakest.fy, E: girder.steel.E }
   const base = {
     job,
     section,
-    steel: { F_y: weakest.fy, E: girder.steel.E },
+    steel,
     wheels,
     trains,
     forces,
     dead,
     live: girder.addedLiveLoad,
     deadWorking: on,
+    topFlange: topFlangeStrength(section, steel),
+    bottomFlange: bottomFlangeStrength(section, steel),
     railArm: leverArm(section, runway.rail.height),
     eccentricity,
     headAboveCentroid: as('length', section.depth - section.yBar + runway.rail.height),

@@ -1,6 +1,6 @@
 /** How a check is put: demand, resistance, their ratio, and the line that compares them. */
 import type { WorkingRecorder } from '../../formula/working.ts'
-import type { Kind, KindValue, Quantity } from '../../quantity/kinds.ts'
+import { as, type Kind, type KindValue, type Quantity } from '../../quantity/kinds.ts'
 import type { Effect } from '../../travel/types.ts'
 import type { Ask, Judgement, Subject } from '../types.ts'
 import type { Loading } from './design.ts'
@@ -23,7 +23,13 @@ export const judgeSum = (on: WorkingRecorder, U: number): Judgement => judge(on,
 /** A derivation begins with the combination and the forces of the heaviest wheel. */
 export function demandOf(loading: Loading, on: WorkingRecorder): void {
   on.note(`${loading.combination.name}, ${loading.set}`, loading.combination.clause)
-  on.include(loading.working)
+  if (loading.train !== undefined) {
+    on.include(
+      loading.working,
+      ['P', 'force', as('force', Math.max(...loading.vertical))],
+      'forces of the heaviest wheel',
+    )
+  }
 }
 
 /** An ask of one loading. */

@@ -27,7 +27,7 @@ export function shearAsks(design: Design, span: number): readonly Ask[] {
       const end = place.value > 0 ? 'left' : 'right'
       const V_u = on.given('V_u', 'force', as('force', Math.abs(place.value)), `greatest shear, at the ${end} bearing`)
       reactionByStatics(design, place, { wheels: loading.vertical, uniform: loading.uniform }, end, on)
-      on.include(strength.working)
+      on.include(strength.working, ['V_n', 'force', strength.V_n], 'shear strength')
       return judge(on, 'force', ['V_u', V_u], ['V_c', strength.available])
     }),
   )

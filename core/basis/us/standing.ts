@@ -9,21 +9,21 @@ const statics = chapter('statics')
 
 const REACTION = statics.formula('moments about the right bearing', {
   gives: ['R_A', 'force'],
-  where: { S_B: 'moment', w: 'lineLoad', L: 'distance', M_A: 'moment', M_B: 'moment' },
-  text: '(S_B + w*L^2/2 + M_B - M_A)/L',
-  note: 'S_B moment of the wheels about the right bearing; M_A, M_B moments entering at the ends',
+  where: { M_PB: 'moment', w: 'lineLoad', L: 'distance', M_A: 'moment', M_B: 'moment' },
+  text: '(M_PB + w*L^2/2 + M_B - M_A)/L',
+  note: 'M_PB moment of the wheels about the right bearing; M_A, M_B moments entering at the ends',
 })
 const END_REACTION = statics.formula('moments about the other bearing', {
   gives: ['R', 'force'],
-  where: { S: 'moment', w: 'lineLoad', L: 'distance' },
-  text: '(S + w*L^2/2)/L',
-  note: 'S moment of the wheels about the other bearing',
+  where: { M_P: 'moment', w: 'lineLoad', L: 'distance' },
+  text: '(M_P + w*L^2/2)/L',
+  note: 'M_P moment of the wheels about the other bearing',
 })
 const MOMENT = statics.formula('moments left of the section', {
   gives: ['M', 'moment'],
-  where: { M_A: 'moment', R_A: 'force', x: 'distance', S_x: 'moment', w: 'lineLoad' },
-  text: 'M_A + R_A*x - S_x - w*x^2/2',
-  note: 'S_x moment of the wheels left of the section about it',
+  where: { M_A: 'moment', R_A: 'force', x: 'distance', M_Px: 'moment', w: 'lineLoad' },
+  text: 'M_A + R_A*x - M_Px - w*x^2/2',
+  note: 'M_Px moment of the wheels left of the section about it',
 })
 
 /**
@@ -52,10 +52,10 @@ export function momentByStatics(
     ])
   }
   const [M_A, M_B] = term.ends
-  const S_B = as('moment', aboutRight)
-  const R_A = on.take(REACTION, { S_B, w: term.uniform, L, M_A, M_B })
+  const M_PB = as('moment', aboutRight)
+  const R_A = on.take(REACTION, { M_PB, w: term.uniform, L, M_A, M_B })
   on.given('x', 'distance', x, 'the section, from the left bearing')
-  return on.take(MOMENT, { M_A, R_A, x, S_x: as('moment', aboutSection), w: term.uniform })
+  return on.take(MOMENT, { M_A, R_A, x, M_Px: as('moment', aboutSection), w: term.uniform })
 }
 
 /** The reaction of one bearing from the wheels on the span; the ends carry no moment. */
@@ -78,7 +78,7 @@ export function reactionByStatics(
       ['P', 'force', wheels[wheel]!],
     ])
   }
-  return on.take(END_REACTION, { S: as('moment', aboutOther), w, L })
+  return on.take(END_REACTION, { M_P: as('moment', aboutOther), w, L })
 }
 
 /** The wheels on the span: index in the train, station along the runway, and how the drawing calls them. */

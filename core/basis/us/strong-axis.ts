@@ -94,7 +94,7 @@ export function strengthAt(
   on: WorkingRecorder,
 ): NewtonMetre {
   const { strength } = axis
-  on.include(strength.working)
+  on.include(strength.working, ['M_n', 'moment', strength.M_n], 'strong-axis strength at C_b = 1')
   if (!usesDiagram(axis)) return strength.M_n
   if (terms.length === 1) {
     on.note(

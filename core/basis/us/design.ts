@@ -17,6 +17,7 @@ import {
 } from './flange.ts'
 import type { Steel } from './flexure.ts'
 import { craneForces, type CraneForces } from './forces.ts'
+import { COVER_COMPACT } from './slenderness.ts'
 
 export interface Design {
   readonly job: Job
@@ -220,7 +221,7 @@ function cautionsOf(base: Base): readonly string[] {
     )
   }
   if (section.cap.thickness > 0) {
-    const limit = 1.12 * Math.sqrt(base.steel.E / base.steel.F_y)
+    const limit = COVER_COMPACT.value(base.steel)
     if (section.cap.slenderness > limit) {
       cautions.push(
         `The cap between its welds has a width over thickness of ${section.cap.slenderness.toFixed(1)}, above ${limit.toFixed(1)} of AISC 360-22 Table B4.1b case 18; F4 has no formula for its buckling: judge it.`,

@@ -1,6 +1,31 @@
 /** Checks that US practice owes a runway girder and this version does not make: named, each with its reason. */
+import { leaveOutClause } from '../../sources/coverage.ts'
 import type { Verdict } from '../types.ts'
 import type { Design } from './design.ts'
+
+const LEFT_OUT = [
+  ['F5', 'slender webs in bending'],
+  ['F13.1', 'holes in a flange: none can be entered'],
+  ['H3.3', 'mixed torsion with its warping stresses'],
+  ['J2.4', 'welds'],
+  ['J10.4', 'web sidesway buckling'],
+  ['J10.5', 'web compression buckling'],
+  ['J10.8', 'bearing stiffeners: none can be entered'],
+  ['App. 3', 'fatigue'],
+] as const
+for (const [clause, reason] of LEFT_OUT) {
+  leaveOutClause({ document: 'AISC 360-22', clause }, 'not-covered', `Not in this version: ${reason}.`)
+}
+leaveOutClause(
+  { document: 'AISC 360-22', clause: 'G2.2' },
+  'not-applicable',
+  'No tension field is counted on in a runway girder (common practice).',
+)
+leaveOutClause(
+  { document: 'AISC 360-22', clause: 'J10.1' },
+  'not-applicable',
+  'A wheel presses on the flange; J10.1 is for tension.',
+)
 
 export function owed({ job, section }: Design): readonly Verdict[] {
   const aisc = 'AISC 360-22'

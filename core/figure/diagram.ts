@@ -9,7 +9,7 @@ import type { Extreme } from '../travel/types.ts'
 import { distanceText } from './dimension.ts'
 import { EDGE, firstFree, within } from './layout.ts'
 import { beamOf, scaleOf, wheelName, wheelsAt, type Shown } from './standing.ts'
-import { CLEAR, LINE, RISE, boxOf, type Text } from './text.ts'
+import { CLEAR, LINE, RISE, boxOf, overlap, type Text } from './text.ts'
 import type { Figure, Item, Point } from './types.ts'
 
 /** Height of the greatest ordinate above and below the base line taken together, mm. */
@@ -190,7 +190,10 @@ const draw = (review: Review, extreme: Extreme, shown: Shown, diagram: Diagram):
   const label =
     mark.value === 0 ? `${write(0)} at this position` : `${write(mark.value)} at station ${station}${mark.where}`
   const near = within({ item: 'text', at: [markX, rowOf(!below)], text: label, role: 'ink', anchor: 'middle' }, width)
-  put([near, ...clearOf(near, texts)])
+  // The value of an end gives way where there is no room for both.
+  const beside = firstFree([near, ...clearOf(near, texts)], texts.map(boxOf), width)
+  const kept = beside === undefined ? texts.filter((other) => !overlap(boxOf(near), boxOf(other))) : texts
+  const written = [...kept, beside ?? near]
   const edge = envelope.map(({ x, max, min }) => at({ x, value: below === (down === 1) ? max : min })[1])
   const hidden = mark.value !== 0 && Math.abs((below ? Math.max(...edge) : Math.min(...edge)) - markY) > 1.5
   const leader: Item = {
@@ -226,7 +229,7 @@ const draw = (review: Review, extreme: Extreme, shown: Shown, diagram: Diagram):
       ...(mark.value === 0
         ? []
         : [{ item: 'circle', centre: [markX, markY], radius: 0.8, fill: 'solid', role: 'accent' } as const]),
-      ...texts,
+      ...written,
     ],
     alt: `${diagram.title === 'moment' ? 'Moment' : 'Shear'} in span ${extreme.span + 1}: ${label}. Envelope from ${write(Math.min(...envelope.map(({ min }) => min)))} to ${write(Math.max(...envelope.map(({ max }) => max)))}.`,
   }

@@ -23,8 +23,11 @@ describe('moment and shear', () => {
           const review = withTrain(standing)
           const extreme = worst(review, kind, standing.span, dead)
           const shown = { units, width, uniform: as('lineLoad', dead) }
-          expectDrawable(momentFigure(review, extreme, shown))
-          expectDrawable(shearFigure(review, extreme, shown))
+          for (const figure of [momentFigure(review, extreme, shown), shearFigure(review, extreme, shown)]) {
+            expectDrawable(figure)
+            const label = /: (.*?)\. Envelope/.exec(figure.alt)?.[1]
+            expect(textsOf(figure).map(({ text }) => text)).toContain(label)
+          }
         },
       ),
       { numRuns: 150 },

@@ -15,7 +15,7 @@ import { smallest } from '../job/plant.ts'
 
 const metre = (value: number): Metre => as('distance', value)
 
-export const reviewed = (job: object): Review => {
+const reviewed = (job: object): Review => {
   const result = reviewText(JSON.stringify(job), catalogue)
   if (!result.ok) throw new Error(JSON.stringify(result.findings))
   return result.review

@@ -7,14 +7,17 @@ import { printable } from './command/text.ts'
 
 const USAGE = `longtravel: sizes, checks and documents the girders that an overhead crane runs on
 
-  longtravel check JOB [--json FILE] [--csv FOLDER]   review a job file; a table of checks on the screen
+  longtravel check JOB [--json FILE] [--pdf FILE] [--csv FOLDER]
+                     review a job file; a table of checks on the screen
       --json FILE    the whole result as JSON, SI units
+      --pdf FILE     the calc sheet, on Letter paper for a job in US units, on A4 for one in SI
       --csv FOLDER   checks.csv and envelope.csv, made where the folder is not there
-  longtravel evidence [--coverage]                    outside checks: printed value, computed value, difference
+  longtravel evidence [--coverage]
+                     outside checks: printed value, computed value, difference
       --coverage     the clauses used and left out as well
   longtravel --help | --version
 
-JOB or FILE may be "-": standard input or output. With --json - nothing else goes to standard output.
+JOB or FILE may be "-": standard input or output. With --json - or --pdf - nothing else goes to standard output.
 
 Exit codes: 0 nothing fails and nothing owed is missing; 1 a check fails; 2 the input is wrong;
 3 a fault of the program; 4 nothing fails, but something owed is not covered.
@@ -46,7 +49,7 @@ export const start = async (): Promise<void> => {
   process.stderr.on('error', refuse('error'))
   const io: Io = {
     stdin: () => process.stdin,
-    stdout: (text) => void process.stdout.write(text),
+    stdout: (written) => void process.stdout.write(written),
     stderr: (text) => void process.stderr.write(text),
     environment: process.env,
   }
@@ -79,21 +82,23 @@ const command = async (args: readonly string[], io: Io): Promise<number> => {
   const [word, job, ...more] = positionals
   if (values.help) return say(USAGE)
   if (values.version) return say(`${manifest.version}\n`)
-  if (values.pdf !== undefined) return refuse('--pdf: not covered by this version')
   if (word === undefined) return refuse(`a command is missing: check or evidence\n\n${USAGE}`)
   if (more.length > 0) return refuse(`${more[0] ?? ''}: one job at a time`)
-  const { json, csv, coverage } = values
+  const { json, csv, pdf, coverage } = values
   if (word === 'check') {
     if (job === undefined) return refuse('check: which job file? longtravel check JOB')
     if (coverage) return refuse('--coverage: goes with evidence, not with check')
     if (csv === '-' || csv === '') return refuse(`--csv: read "${csv}"; a folder is needed`)
     if (json === '') return refuse('--json: read ""; a file is needed, or - for standard output')
+    if (pdf === '') return refuse('--pdf: read ""; a file is needed, or - for standard output')
+    if (pdf === '-' && json === '-') return refuse('--json and --pdf: only one of them can be standard output')
     const { check } = await import('./command/check.ts')
-    return check({ job, json, csv }, io)
+    return check({ job, json, csv, pdf }, io)
   }
   if (word === 'evidence') {
     if (job !== undefined) return refuse(`${job}: evidence takes no job`)
-    if (json !== undefined || csv !== undefined) return refuse('--json and --csv go with check, not with evidence')
+    if (json !== undefined || csv !== undefined || pdf !== undefined)
+      return refuse('--json, --csv and --pdf go with check, not with evidence')
     const { evidence } = await import('./command/evidence.ts')
     return evidence(coverage, io)
   }

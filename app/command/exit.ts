@@ -14,7 +14,7 @@ export const EXIT = {
 /** Where the command reads and writes: the process in use, texts in the tests. */
 export interface Io {
   readonly stdin: () => AsyncIterable<Uint8Array>
-  readonly stdout: (text: string) => void
+  readonly stdout: (written: string | Uint8Array) => void
   readonly stderr: (text: string) => void
   readonly environment: Readonly<Record<string, string | undefined>>
 }

@@ -5,7 +5,7 @@ import { reasonOf } from './reason.ts'
 
 export interface Target {
   readonly path: string
-  readonly text: string
+  readonly content: string | Uint8Array
 }
 
 /**
@@ -38,12 +38,12 @@ export const writeAll = async (targets: readonly Target[], folder: string | unde
   let current = folder ?? ''
   try {
     if (folder !== undefined) made = await mkdir(folder, { recursive: true })
-    for (const { path, text } of targets) {
+    for (const { path, content } of targets) {
       current = path
       const to = await trueOf(path)
       const from = join(dirname(to), `.${basename(to)}.${process.pid}.new`)
       beside.push({ from, to })
-      await writeThrough(from, text, await modeOf(to))
+      await writeThrough(from, content, await modeOf(to))
     }
     for (const { from, to } of beside) {
       current = to
@@ -97,11 +97,11 @@ const modeOf = async (path: string): Promise<number | undefined> =>
   )
 
 /** Text to a new file, on the disk before this returns. */
-const writeThrough = async (path: string, text: string, mode: number | undefined): Promise<void> => {
+const writeThrough = async (path: string, content: string | Uint8Array, mode: number | undefined): Promise<void> => {
   const file = await open(path, 'wx')
   try {
     if (mode !== undefined) await file.chmod(mode)
-    await file.writeFile(text)
+    await file.writeFile(content)
     await file.sync()
   } finally {
     await file.close()

@@ -157,7 +157,8 @@ describe('the command line', () => {
     [['search', 'job.json', '--lightest'], 'search: not covered by this version'],
     [['rate', 'job.json'], 'rate: not covered by this version'],
     [['compare', 'a.json', 'b.json'], 'compare: not covered by this version'],
-    [['check', 'job.json', '--pdf', 'a.pdf'], '--pdf: not covered by this version'],
+    [['check', 'job.json', '--pdf', ''], '--pdf: read ""; a file is needed, or - for standard output'],
+    [['check', 'job.json', '--pdf', '-', '--json', '-'], '--json and --pdf: only one of them can be standard output'],
     [['check'], 'check: which job file? longtravel check JOB'],
     [['check', 'a.json', 'b.json'], 'b.json: one job at a time'],
     [['check', 'a.json', '--csv', '-'], '--csv: read "-"; a folder is needed'],
@@ -166,7 +167,7 @@ describe('the command line', () => {
     [['check', 'a.json', '--coverage'], '--coverage: goes with evidence, not with check'],
     [['check', 'a.json', '--jsn', 'b'], `Unknown option '--jsn' ("longtravel --help" lists the options)`],
     [['evidence', 'a.json'], 'a.json: evidence takes no job'],
-    [['evidence', '--json', 'a'], '--json and --csv go with check, not with evidence'],
+    [['evidence', '--json', 'a'], '--json, --csv and --pdf go with check, not with evidence'],
     [['chekc', 'a.json'], 'chekc: no such command; there are check and evidence ("longtravel --help")'],
   ])('refuses %j in one line', async (args, message) => {
     expect(await ran(args)).toEqual({ exit: 2, out: '', err: `${message}\n` })

@@ -23,8 +23,8 @@ export const ran = async (
         }
   const exit = await run(args, {
     stdin,
-    stdout: (text) => {
-      out += text
+    stdout: (written) => {
+      out += typeof written === 'string' ? written : Buffer.from(written).toString('latin1')
     },
     stderr: (text) => {
       err += text

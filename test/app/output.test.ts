@@ -30,8 +30,8 @@ describe('writeAll', () => {
   it('writes new files and replaces old ones, keeping their mode and leaving nothing beside', async () => {
     writeFileSync(at('old'), 'before', { mode: 0o640 })
     const targets = [
-      { path: at('old'), text: 'after' },
-      { path: at('new'), text: 'first' },
+      { path: at('old'), content: 'after' },
+      { path: at('new'), content: 'first' },
     ]
     expect(await writeAll(targets, undefined)).toBeUndefined()
     expect([text(at('old')), text(at('new'))]).toEqual(['after', 'first'])
@@ -42,7 +42,7 @@ describe('writeAll', () => {
   it('writes what a link points to and keeps the link', async () => {
     writeFileSync(at('real'), 'before')
     symlinkSync(at('real'), at('link'))
-    expect(await writeAll([{ path: at('link'), text: 'after' }], undefined)).toBeUndefined()
+    expect(await writeAll([{ path: at('link'), content: 'after' }], undefined)).toBeUndefined()
     expect(text(at('real'))).toBe('after')
     expect(readdirSync(folder).sort()).toEqual(['link', 'real'])
   })
@@ -50,8 +50,8 @@ describe('writeAll', () => {
   it('leaves every former file as it was where one cannot be written', async () => {
     writeFileSync(at('old'), 'before')
     const targets = [
-      { path: at('old'), text: 'after' },
-      { path: at('missing', 'new'), text: 'never' },
+      { path: at('old'), content: 'after' },
+      { path: at('missing', 'new'), content: 'never' },
     ]
     expect(await writeAll(targets, undefined)).toBe(
       `${at('missing', 'new')}: cannot be written: there is no such file or folder`,
@@ -61,7 +61,7 @@ describe('writeAll', () => {
   })
 
   it('takes a folder back that it made in vain', async () => {
-    const targets = [{ path: at('old', 'below'), text: 'never' }]
+    const targets = [{ path: at('old', 'below'), content: 'never' }]
     writeFileSync(at('old'), 'before')
     expect(await writeAll(targets, at('fresh'))).toBe(
       `${at('old', 'below')}: cannot be written: a part of the path is a file, not a folder`,
@@ -71,7 +71,7 @@ describe('writeAll', () => {
 
   it('refuses a folder in the place of a file and leaves no half-written file', async () => {
     mkdirSync(at('taken'))
-    const message = await writeAll([{ path: at('taken'), text: 'never' }], undefined)
+    const message = await writeAll([{ path: at('taken'), content: 'never' }], undefined)
     expect(message).toMatch(/cannot be written: it is a folder$/)
     expect(readdirSync(folder)).toEqual(['taken'])
   })

@@ -5,9 +5,12 @@ import { echo } from '../quantity/signs.ts'
 import { CALLS, type Answer, type Argument, type CallName } from './calls.ts'
 import { done, refuse, type CallError, type Outcome } from './errors.ts'
 
+/** A field that is too long need not also be told that it is of the wrong form. */
+const ONE_FAULT_A_FIELD = { abortPipeEarly: true } as const
+
 /** The argument of a call, or an error of kind `argument` that names every wrong field. */
 export const readArgument = <N extends CallName>(name: N, argument: unknown): Outcome<Argument<N>> => {
-  const read = v.safeParse(CALLS[name].argument, argument)
+  const read = v.safeParse(CALLS[name].argument, Array.isArray(argument) ? undefined : argument, ONE_FAULT_A_FIELD)
   if (read.success) return done(read.output as Argument<N>)
   const at = faultsOf(read.issues)
   return refuse(
@@ -19,7 +22,7 @@ export const readArgument = <N extends CallName>(name: N, argument: unknown): Ou
 
 /** The answer to a call, or an error of kind `fault`: only a fault of the program makes a wrong answer. */
 export const readAnswer = <N extends CallName>(name: N, answer: unknown): Outcome<Answer<N>> => {
-  const read = v.safeParse(CALLS[name].result, answer)
+  const read = v.safeParse(CALLS[name].result, answer, ONE_FAULT_A_FIELD)
   if (read.success) return done(read.output as Answer<N>)
   const at = faultsOf(read.issues)
   return refuse(

@@ -20,9 +20,8 @@ export const another = async (
 ): Promise<Another> => {
   const node = [process.execPath, '--expose-gc', '--input-type=module-typescript', '-e']
   const waiting = `${script}\nsetInterval(() => undefined, 1000)`
-  const [command, ...args] =
-    how.limits === undefined ? [...node, waiting] : ['sh', '-c', `${how.limits}; exec "$@"`, 'sh', ...node, waiting]
-  const child = spawn(command!, args, {
+  const limited = ['-c', `${how.limits ?? 'true'}; exec "$@"`, 'sh', ...node, waiting]
+  const child = spawn('sh', limited, {
     cwd: PROJECT,
     stdio: ['ignore', 'pipe', 'pipe'],
     ...(how.user === undefined ? {} : { uid: how.user, gid: how.user }),

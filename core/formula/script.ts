@@ -51,7 +51,8 @@ export const mathml: Script = {
   symbol: mathSymbol,
   quantity: (number, unit) =>
     unit === '' ? mathNumber(number) : `<mrow>${mathNumber(number)}<mspace width="0.2em"/>${mathUnit(unit)}</mrow>`,
-  words: (text) => `<mtext>${escaped(text)}</mtext>`,
+  // MathML drops spaces at the ends of a text; those that do not break stay.
+  words: (text) => `<mtext>${escaped(text.replace(/^ | $/g, '\u00a0'))}</mtext>`,
   bound: (inner, complete) => (complete ? `${SIGNS[',']}${inner}` : inner),
   sign: (sign) => SIGNS[sign],
   fraction: (top, bottom) => `<mfrac>${row(top)}${row(bottom)}</mfrac>`,

@@ -31,11 +31,11 @@ export function formulaRows(parts: readonly Element[], widthOf: RowWidth): reado
       rest = opened
       continue
     }
-    // One sign wider than the column: nothing can be broken, and the page scales it.
-    if (cut === undefined) return [...rows, rowOf(rest, drawing)]
-    const head = rest.slice(0, cut)
+    // A figure wider than the column cannot be broken: its row ends at the next place, and the page scales it.
+    const end = cut ?? nextCut(rest)
+    const head = rest.slice(0, end)
     rows.push(rowOf(head, set(head)))
-    rest = continued(rest.slice(cut))
+    rest = continued(rest.slice(end))
   }
   return rows
 }
@@ -79,6 +79,12 @@ function cutOf(parts: readonly Element[], drawing: Drawing, width: number): numb
     }
   }
   return best
+}
+
+/** The first place of any kind; the end where there is none. */
+function nextCut(parts: readonly Element[]): number {
+  const next = parts.findIndex((part, index) => index > 0 && Number.isFinite(rankOf(part)))
+  return next < 0 ? parts.length : next
 }
 
 /** How good a place before this part is: relations, then sums, then products; infinite where none is. */

@@ -48,6 +48,21 @@ export function typeset(mathml: string): Drawing {
   return { width, ascent: -top, depth: height + top, ...found, starts: startsOf(adaptor, svg) }
 }
 
+/** Characters of a MathML text that the typeface of formulas lacks; each is tried once. */
+export function lackingIn(mathml: string): readonly string[] {
+  const words = mathml.replace(/<[^>]*>/g, '')
+  return Array.from(new Set(words.match(/[^\x20-\x7e\u2061-\u2064]/gu) ?? [])).filter((character) => {
+    let drawn = drawable.get(character)
+    if (drawn === undefined) {
+      drawn = typeset(`<math><mrow><mtext>${character}</mtext></mrow></math>`).lacking.length === 0
+      drawable.set(character, drawn)
+    }
+    return !drawn
+  })
+}
+
+const drawable = new Map<string, boolean>()
+
 interface Place {
   readonly scaleX: number
   readonly scaleY: number

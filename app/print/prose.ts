@@ -55,7 +55,8 @@ export function paragraphSlabs(
     return {
       height,
       gap: index === 0 ? 5 : 0,
-      keep: (index === 0 && !last) || index === lines.length - 2,
+      // What stands beside the clause stays on its page.
+      keep: !last && (index === 0 || index === lines.length - 2 || (index + 1) * style.leading < (beside?.height ?? 0)),
       draw: (_, top) => {
         if (tone === 'caution')
           artifact(pen, 'Layout', () =>

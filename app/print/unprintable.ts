@@ -1,6 +1,7 @@
 /** Characters that cannot be drawn, found in the whole sheet before anything is printed. */
 import type { Block, Sheet } from '../../core/sheet/types.ts'
 import type { Faces } from './faces.ts'
+import { lackingIn } from './formula.ts'
 import { tidy } from './text.ts'
 
 /** Text with characters that no typeface of the program draws: scripts other than Latin, Greek, Cyrillic; pictures; controls. */
@@ -27,8 +28,8 @@ export class UnprintableText extends Error {
 export function unprintableIn(sheet: Sheet, faces: Faces): UnprintableText | undefined {
   const characters = new Set<string>()
   const where = new Set<string>()
-  for (const [place, text] of textsOf(sheet)) {
-    const lacking = faces.undrawn(tidy(text).replaceAll('\n', ''))
+  for (const [place, text, formula = ''] of textsOf(sheet)) {
+    const lacking = [...faces.undrawn(tidy(text).replaceAll('\n', '')), ...lackingIn(formula)]
     if (lacking.length === 0) continue
     for (const character of lacking) characters.add(character)
     where.add(place)
@@ -36,7 +37,7 @@ export function unprintableIn(sheet: Sheet, faces: Faces): UnprintableText | und
   return characters.size === 0 ? undefined : new UnprintableText([...characters], [...where])
 }
 
-type Placed = readonly [place: string, text: string]
+type Placed = readonly [place: string, text: string, mathml?: string]
 
 const FIELD: Readonly<Record<keyof Sheet['title'], string>> = {
   project: 'project',
@@ -58,7 +59,7 @@ function textsOf(sheet: Sheet): readonly Placed[] {
   const blocks = sheet.blocks.flatMap((block) => {
     if (block.block === 'heading') heading = `${block.number} ${block.text}`.trim()
     const under = heading === '' ? '' : ` under "${heading}"`
-    return blockTexts(block).map(([place, text]): Placed => [`${place}${under}`, text])
+    return blockTexts(block).map(([place, ...texts]): Placed => [`${place}${under}`, ...texts])
   })
   return [...title, ...foot, ...blocks]
 }
@@ -81,7 +82,11 @@ function blockTexts(block: Block): readonly Placed[] {
     case 'entries':
       return block.rows.map(({ label, value, source = '' }): Placed => [`entry ${label}`, label + value + source])
     case 'working':
-      return block.lines.map(({ clause, note }): Placed => ['working', clause + note])
+      return block.lines.map(({ clause, note, symbols, values }): Placed => [
+        'working',
+        clause + note,
+        symbols + values,
+      ])
     case 'figure':
       return [
         ['caption', block.caption],

@@ -82,7 +82,10 @@ interface Piece {
   readonly kind: 'formula' | 'words'
 }
 
-/** One slab a piece, kept together: a line of a working is never parted, though a very long one could be. */
+/**
+ * A line as one slab, so that it is never parted; only one that fills most of a page is a slab a row. `more` says that what
+ * follows must stay with it.
+ */
 function stacked(
   pen: Pen,
   line: Line,
@@ -91,34 +94,41 @@ function stacked(
   beside: ReturnType<typeof clauseBeside> | undefined,
   more: boolean,
 ): readonly Slab[] {
-  const heights = pieces.map(({ ascent, depth }) => ascent + depth)
-  const total = heights.reduce((sum, height) => sum + height, 0) + ROW_GAP * (pieces.length - 1)
-  const missing = Math.max(0, (beside?.height ?? 0) - total)
   const x = pen.frame.left + INDENT
+  const isFormula = pieces.some(({ kind }) => kind === 'formula')
   let tag: Tag | undefined
-  return pieces.map((piece, index) => {
-    const last = index === pieces.length - 1
-    const pad = pieces.length === 1 ? missing / 2 : 0
-    const height = heights[index]! + (pieces.length === 1 ? missing : last ? missing : 0)
+  const slab = (from: number, to: number): Slab => {
+    const own = pieces.slice(from, to)
+    const tall = own.reduce((sum, { ascent, depth }) => sum + ascent + depth, 0) + ROW_GAP * (own.length - 1)
+    const height = from === 0 ? Math.max(tall, beside?.height ?? 0) : tall
+    const last = to === pieces.length
     return {
       height,
-      gap: index === 0 ? gap : ROW_GAP,
+      gap: from === 0 ? gap : ROW_GAP,
       keep: !last || more,
       draw: (_, top) => {
-        const baseline = top + pad + piece.ascent
-        const isFormula = pieces.some(({ kind }) => kind === 'formula')
         tag ??= openTag(pen, isFormula ? 'Formula' : 'P', isFormula ? { alt: line.text } : {})
         tag.draw(() => {
-          // All of the line is read where its first row stands.
-          if (index === 0 && isFormula)
-            readAs(pen, { text: formulaText(line), x, baseline, width: piece.inked, size: FORMULA_SIZE })
-          piece.draw(x, baseline)
+          let at = top + (own.length === 1 ? (height - tall) / 2 : 0)
+          own.forEach((piece, index) => {
+            const baseline = at + piece.ascent
+            // All of the line is read where its first row stands.
+            if (from + index === 0 && isFormula)
+              readAs(pen, { text: formulaText(line), x, baseline, width: piece.inked, size: FORMULA_SIZE })
+            piece.draw(x, baseline)
+            at += piece.ascent + piece.depth + ROW_GAP
+          })
         })
-        if (index === 0) beside?.draw(top, Math.max(heights[0]! + pad * 2, beside.height))
+        // The clause stands beside the first row, or beside all of them where it is taller.
+        const first = own[0]!.ascent + own[0]!.depth
+        if (from === 0) beside?.draw(top, Math.max(own.length === 1 ? height : first, beside.height))
         if (last) tag.end()
       },
     }
-  })
+  }
+  const whole = slab(0, pieces.length)
+  if (pieces.length === 1 || whole.height < pen.frame.height / 2) return [whole]
+  return pieces.map((_, index) => slab(index, index + 1))
 }
 
 /** The line's plain text without the note, which is drawn as words. */

@@ -3,6 +3,7 @@ import { writeFeetInches, writeNumber, writeQuantity } from '../../core/quantity
 import { as, type Quantity, type UnitSystem } from '../../core/quantity/kinds.ts'
 import { STANDING_CAUTIONS } from '../../core/review/cautions.ts'
 import type { Check, Place, Review } from '../../core/review/types.ts'
+import { sectionName } from '../../core/section/name.ts'
 import { citation } from '../../core/sources/clause.ts'
 import type { Extreme } from '../../core/travel/types.ts'
 import { columns, printable, wrap } from './text.ts'
@@ -31,9 +32,9 @@ export const reviewTable = (review: Review): string => {
   )
 }
 
-const heading = ({ program, job, section }: Review): readonly string[] => [
+const heading = ({ program, job }: Review): readonly string[] => [
   ...wrap([job.project.title, job.project.subject ?? ''].filter((text) => text !== '').join(': '), 0),
-  ...wrap(`${section.name}, ${spansText(job.runway.spans, job.units)}`, 0),
+  ...wrap(`${sectionName(job.girder.section, job.units)}, ${spansText(job.runway.spans, job.units)}`, 0),
   `${job.basis.standard.toUpperCase()} rules, ${job.basis.method}; fingerprint ${job.fingerprint.slice(0, 12)}; longtravel ${program}`,
 ]
 

@@ -3,6 +3,7 @@ import { spanOf } from '../travel/influence.ts'
 import type { MomentProof } from '../travel/proof.ts'
 import type { Extreme } from '../travel/types.ts'
 import type { Review } from '../review/types.ts'
+import { sectionName } from '../section/name.ts'
 import { BLOCK, blockAbove, bridges, inView, wheelRadius } from './bridge.ts'
 import { ABOVE, chain, distanceText, over, tick, type Mark } from './dimension.ts'
 import { girders, heightsOf } from './girders.ts'
@@ -244,7 +245,7 @@ const altText = (
   const { length } = spanOf(beamOf(review), extreme.span)
   const distance = (metres: number): string => distanceText(metres, units)
   const sentences = [
-    `Elevation of span ${extreme.span + 1}, ${distance(length)} between supports, ${review.section.name}.`,
+    `Elevation of span ${extreme.span + 1}, ${distance(length)} between supports, ${sectionName(review.job.girder.section, units)}.`,
   ]
   for (const wheel of wheels)
     sentences.push(

@@ -2,6 +2,7 @@
 import type { Runway, SectionEntry } from '../job/types.ts'
 import { as, type UnitSystem } from '../quantity/kinds.ts'
 import { writeQuantity } from '../quantity/write.ts'
+import { sectionName } from '../section/name.ts'
 import type { Section } from '../section/types.ts'
 import { ABOVE, over, tick } from './dimension.ts'
 import { EDGE, spread } from './layout.ts'
@@ -136,7 +137,7 @@ export const sectionFigure = (section: Section, entry: SectionEntry, shown: Sect
         ? actions([centre, head], headHalf, wheelLoad === undefined ? '' : forceText(wheelLoad, units), push)
         : []),
     ],
-    alt: altText(section, shown, length),
+    alt: altText(section, entry, shown, length),
   }
 }
 
@@ -202,11 +203,12 @@ const actions = ([x, head]: Point, half: number, load: string, push: string): re
 
 const altText = (
   section: Section,
+  entry: SectionEntry,
   { rail, wheelLoad, sideThrust, units }: SectionShown,
   length: (metres: number) => string,
 ): string => {
   const sentences = [
-    `Cross-section of ${section.name}, ${length(section.depth)} deep, with rail ${rail.name}.`,
+    `Cross-section of ${sectionName(entry, units)}, ${length(section.depth)} deep, with rail ${rail.name}.`,
     `Centroid ${length(section.yBar)} and plastic axis ${length(section.yPlastic)} above the bottom.`,
     `Web ${length(section.tw)} thick, top flange ${length(section.topFlange.width)} by ${length(section.topFlange.thickness)}, bottom flange ${length(section.bottomFlange.width)} by ${length(section.bottomFlange.thickness)}.`,
   ]

@@ -49,7 +49,6 @@ export function sectionOf(entry: SectionEntry): Section {
 
   return {
     makeUp: entry.kind === 'plated' ? 'plated' : entry.cap === undefined ? 'rolled' : 'capped',
-    name: nameOf(entry),
     doublySymmetric,
     A: as('area', A),
     depth: as('length', depth),
@@ -152,18 +151,3 @@ const flangeSystem = ({ A, y, Iy, Zy }: Part, width: number): FlangeSystem => ({
 
 const rtCapped = (top: FlangeSystem, webInCompression: number): number =>
   Math.sqrt(top.I / (top.A + webInCompression / 3))
-
-/** As on a drawing; plates in millimetres, width by thickness, the web depth by thickness. */
-function nameOf(entry: SectionEntry): string {
-  const { cap } = entry
-  const girder =
-    entry.kind === 'rolled'
-      ? entry.shape.name
-      : `PL ${plateName(entry.topFlange)} / ${millimetres(entry.web.depth)}x${millimetres(entry.web.thickness)} / ${plateName(entry.bottomFlange)}`
-  if (cap === undefined) return girder
-  return `${girder} + ${cap.kind === 'channel' ? cap.channel.name : `PL ${plateName(cap.plate)}`}`
-}
-
-const plateName = ({ width, thickness }: Plate): string => `${millimetres(width)}x${millimetres(thickness)}`
-
-const millimetres = (length: number): string => String(Number((length * 1000).toFixed(2)))

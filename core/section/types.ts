@@ -19,8 +19,6 @@ export interface FlangeSystem {
 export interface Section {
   /** 'rolled' alone has handbook figures; 'capped' is rolled with a cap; 'plated' is welded from plates. */
   readonly makeUp: 'rolled' | 'capped' | 'plated'
-  /** As it is called on a drawing: "W27X84 + C15X33.9", "PL 350x20 / 650x8 / 250x14". */
-  readonly name: string
   readonly doublySymmetric: boolean
 
   readonly A: SquareMetre

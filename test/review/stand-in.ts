@@ -80,11 +80,11 @@ const job = {
   basis: { standard: 'us', method: 'LRFD' },
   cranes: [{ name: 'North' }],
   runway: { spans: [m(6)], continuity: 'simple' },
+  girder: { section: { kind: 'rolled', shape: { name: 'W24X84' } } },
   fingerprint: '0123456789abcdef'.repeat(4),
 } as unknown as Job
 
 const section = {
-  name: 'W24X84',
   A: 0.016,
   depth: 0.6,
   yBar: 0.3,

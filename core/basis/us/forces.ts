@@ -53,7 +53,9 @@ export function craneForces(basis: Basis, crane: Crane, wheels: readonly Newton[
   const on = working()
   const cautions: string[] = []
   const impact = impactOf(basis, crane, cautions)
-  on.given('I', 'ratio', impact.fraction, impact.reason, cranes.clause('4.9.3'))
+  if (basis.impact === 'standard')
+    on.row('Impact', impact.reason, [['I', 'ratio', impact.fraction]], cranes.clause('4.9.3'))
+  else on.given('I', 'ratio', impact.fraction, impact.reason)
 
   const sum = as('force', total(wheels))
   const sideThrust = sideThrustOf(basis, crane, wheels, sum, on)
@@ -64,22 +66,22 @@ export function craneForces(basis: Basis, crane: Crane, wheels: readonly Newton[
 }
 
 function impactOf(basis: Basis, crane: Crane, cautions: string[]): { fraction: number; reason: string } {
-  if (basis.impact !== 'standard') return { fraction: basis.impact, reason: 'impact as entered' }
+  if (basis.impact !== 'standard') return { fraction: basis.impact, reason: 'impact, as entered' }
   const drives = [crane.bridgeDrive, crane.trolleyDrive, crane.hoistDrive]
   if (drives.every((drive) => drive === 'hand')) {
-    return { fraction: 0, reason: 'impact: bridge, trolley and hoist all hand-geared' }
+    return { fraction: 0, reason: 'bridge, trolley and hoist all hand-geared' }
   }
   switch (crane.operation) {
     case 'pendant':
-      return { fraction: 0.1, reason: 'impact: powered, pendant-operated' }
+      return { fraction: 0.1, reason: 'powered, pendant-operated' }
     case 'cab':
     case 'remote':
-      return { fraction: 0.25, reason: `impact: powered, ${crane.operation}-operated` }
+      return { fraction: 0.25, reason: `powered, ${crane.operation}-operated` }
     case 'hand':
       cautions.push(
         `${crane.name}: operated by hand but with a powered drive, which ASCE 7-22 4.9.3 does not list; the 25 % of powered cranes is used.`,
       )
-      return { fraction: 0.25, reason: 'impact: hand-operated with a powered drive, taken as powered' }
+      return { fraction: 0.25, reason: 'hand-operated with a powered drive, taken as powered' }
   }
 }
 

@@ -5,7 +5,7 @@ import { sectionOf } from '../section/properties.ts'
 import type { Section } from '../section/types.ts'
 import type { EvidenceCase } from './types.ts'
 
-export function capped(shape: string, channel: string): Section {
+function capped(shape: string, channel: string): Section {
   return sectionOf({
     kind: 'rolled',
     shape: catalogue.iShape(shape)!,

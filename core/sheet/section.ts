@@ -8,7 +8,7 @@ import { FIGURE_WIDTH } from './governing.ts'
 import type { Block } from './types.ts'
 
 export function sectionPart({ section, job }: Review, units: UnitSystem, number: string): readonly Block[] {
-  const q = <K extends Kind>(kind: K, value: KindValue[K]): string => shown({ kind, value } as never, units)
+  const q = <K extends Kind>(kind: K, value: KindValue[K]): string => shown({ kind, value }, units)
   const { top, bottom } = section
   const table = (rows: readonly (readonly string[])[]): Block => ({
     block: 'table',

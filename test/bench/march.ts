@@ -18,12 +18,11 @@ export function marchedMoment({ span, loads, offsets }: March, steps: number): n
       if (x >= 0 && x <= span) reaction += (loads[i]! * (span - x)) / span
     }
     let left = 0
-    let moment = 0
     for (let i = 0; i < loads.length; i++) {
       const x = lead + offsets[i]!
       if (x < 0 || x > span) continue
       // Moment of the wheels left of x about x, carried from wheel to wheel.
-      moment = reaction * x - left * x + weighted(loads, offsets, lead, i)
+      const moment = reaction * x - left * x + weighted(loads, offsets, lead, i)
       left += loads[i]!
       if (moment > greatest) greatest = moment
     }

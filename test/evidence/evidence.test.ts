@@ -16,7 +16,9 @@ describe('outside checks', () => {
   })
 
   it('explains every tolerance wider than half of the last printed digit', () => {
-    const wide = results.filter(({ printed, tolerance, why }) => why === undefined && tolerance > 0.51 * lastDigit(printed))
+    const wide = results.filter(
+      ({ printed, tolerance, why }) => why === undefined && tolerance > 0.51 * lastDigit(printed),
+    )
     expect(wide.map(({ id }) => id)).toEqual([])
   })
 })

@@ -18,7 +18,7 @@ interface LimitState<K extends 'moment' | 'force'> {
 
 /** Recorder of phi M_n or M_n / Omega, the nominal strength being given. */
 export function available<K extends 'moment' | 'force'>(
-  chapter: Chapter<string>,
+  chapter: Chapter,
   equation: string,
   { kind, strength, subscript, ...factors }: LimitState<K>,
 ) {

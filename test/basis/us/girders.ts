@@ -60,11 +60,17 @@ const BRANTOFT = {
   girder: { steel: { name: 'A992' }, section: { kind: 'rolled', shape: 'W27X94' } },
 } as const
 
-type Change = (job: Record<string, any>) => void // eslint-disable-line @typescript-eslint/no-explicit-any
+/** The job's file while a test changes it. */
+interface Draft {
+  readonly basis: Record<string, unknown>
+  readonly cranes: Record<string, unknown>[]
+  readonly runway: Record<string, unknown>
+  readonly girder: { readonly section: Record<string, unknown> }
+}
 
 /** The review of the invented job with a change made to its file. */
-export function reviewed(change: Change = () => undefined): Review {
-  const job = structuredClone(BRANTOFT) as unknown as Record<string, unknown>
+export function reviewed(change: (job: Draft) => void = () => undefined): Review {
+  const job = structuredClone(BRANTOFT) as unknown as Draft
   change(job)
   const result = reviewText(JSON.stringify(job), catalogue)
   if (!result.ok) throw new Error(result.findings.map(({ path, message }) => `${path}: ${message}`).join('; '))

@@ -180,7 +180,7 @@ describe('choices', () => {
   })
 
   it('hand-geared cranes bring no impact, no side thrust and no longitudinal force', () => {
-    const [action] = reviewed((job) => (job.cranes[0].operation = 'hand')).actions
+    const [action] = reviewed((job) => (job.cranes[0]!.operation = 'hand')).actions
     expect(action!.impact).toBe(0)
     expect(action!.sideThrustPerWheel.map(({ value }) => value)).toEqual([0, 0])
     expect(action!.longitudinal.value).toBe(0)
@@ -189,7 +189,7 @@ describe('choices', () => {
   it('side thrust by load follows the wheel loads and keeps its sum', () => {
     const [action] = reviewed((job) => {
       job.basis.sideThrustPerWheel = 'by-load'
-      job.cranes[0].wheelLoad = ['30 kip', '20 kip']
+      job.cranes[0]!.wheelLoad = ['30 kip', '20 kip']
     }).actions
     const [first, second] = action!.sideThrustPerWheel.map(({ value }) => inUnit(value, 'kip')) as [number, number]
     expect(first / second).toBeCloseTo(1.5, 9)
@@ -205,7 +205,7 @@ describe('choices', () => {
 
   it('wheels so near that their lengths of web overlap act as one', () => {
     const near = check(
-      reviewed((job) => (job.cranes[0].wheelSpacings = ['10 in'])),
+      reviewed((job) => (job.cranes[0]!.wheelSpacings = ['10 in'])),
       'us.web.yielding.wheel',
     )
     expect(inUnit(near.demand!.value, 'kip')).toBeCloseTo(2 * HAND.factored, 9)

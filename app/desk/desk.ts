@@ -15,7 +15,7 @@ export interface CallOptions {
 }
 
 export interface Desk {
-  /** Never rejects: what goes wrong is an outcome. */
+  /** What goes wrong is an outcome; only an argument that is no plain data throws. */
   readonly call: <N extends CallName>(
     name: N,
     argument: Argument<N>,
@@ -34,8 +34,9 @@ export const startDesk = ({ home }: { readonly home: string }): Desk =>
   deskOf(new Worker(workerFile(), { workerData: { home } }))
 
 /**
- * The worker's file stands beside this one, as source or as the bundle's second entry named `worker`. A bundler for Node leaves
- * the line as it is: build { desk or main, worker } as two entries of one SSR build into one folder, [name].js.
+ * The worker's file stands beside this one: as source, or in a bundle as an entry of its own named `worker`. Vite leaves the line
+ * as it is in a build for Node; the build has two entries, entryFileNames and chunkFileNames '[name].js', so that all lies
+ * in one folder.
  */
 const workerFile = (): URL =>
   import.meta.url.endsWith('.ts') ? new URL('./worker.ts', import.meta.url) : new URL('./worker.js', import.meta.url)

@@ -172,7 +172,6 @@ const unfitToOpen = async (file: string, rights: number): Promise<CallError | un
   // A record is made whole and then renamed, so that none is ever empty by itself; SQLite would make an empty one anew.
   if (found.size === 0) return refuse('damaged', `${file}: is empty; ${DAMAGED}`).error
   await access(file, rights)
-  if (rights & constants.W_OK) await access(dirname(file), constants.W_OK)
   return undefined
 }
 

@@ -31,6 +31,7 @@ describe('a kept revision is protected by the database itself, whatever program 
     ['DELETE FROM projects', 'FOREIGN KEY'],
     ['UPDATE jobs SET id = 9', 'FOREIGN KEY'],
     [`REPLACE INTO revisions (id, ${COLUMNS}) SELECT 1, * FROM (${copyOf('sequence', 'label')})`, 'next of its job'],
+    [`REPLACE INTO revisions (id, ${COLUMNS}) SELECT 1, * FROM (${copyOf('2', "'C'")})`, 'next of its job'],
     [`REPLACE INTO revisions (${COLUMNS}) ${copyOf('sequence', 'label')}`, 'next of its job'],
     [`REPLACE INTO revisions (${COLUMNS}) ${copyOf('2', 'label')}`, 'next of its job'],
     [`INSERT INTO revisions (${COLUMNS}) ${copyOf('5', "'F'")}`, 'next of its job'],

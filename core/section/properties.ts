@@ -1,6 +1,6 @@
 /** A make-up as parts, and the properties that the checks read from them. */
 import type { IShape } from '../catalogue/types.ts'
-import type { Cap, Plate, SectionEntry } from '../job/types.ts'
+import type { Cap, SectionEntry } from '../job/types.ts'
 import { as } from '../quantity/kinds.ts'
 import { channelLegsDown, flatPlate, join, rolledFlange, rolledI, standingPlate, type Part } from './parts.ts'
 import { plasticAxis } from './plastic.ts'

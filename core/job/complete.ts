@@ -18,9 +18,8 @@ export const complete = (walked: Walked, fingerprint: string): Job => ({
 /** Texts as typed; numbers, flags and lists of them as JSON writes them. Objects are told by their own fields. */
 const enteredLeaves = ({ entered }: Walked): Job['entered'] =>
   [...entered].flatMap(([path, json]) => {
-    if (isObject(json) || (Array.isArray(json) && json.some((each) => isObject(each)))) return []
-    const value = Array.isArray(json) ? json.map(asTyped).join(', ') : asTyped(json)
-    return [{ path, value }]
+    const values: readonly Json[] = Array.isArray(json) ? (json as readonly Json[]) : [json]
+    return values.some((each) => isObject(each)) ? [] : [{ path, value: values.map(asTyped).join(', ') }]
   })
 
 const asTyped = (json: Json): string => (typeof json === 'string' ? json : JSON.stringify(json))

@@ -4,6 +4,7 @@ import { leaf, mathOf, row, type Element } from './mathml.ts'
 
 /** One row of a formula as it is drawn. */
 export interface FormulaRow {
+  readonly parts: readonly Element[]
   readonly drawing: Drawing
   /** Where its first relation stands, so that the rows below can stand under it; undefined where it has none. */
   readonly relation: number | undefined
@@ -59,7 +60,7 @@ const REMEMBERED = 2000
 
 const rowOf = (parts: readonly Element[], drawing: Drawing): FormulaRow => {
   const index = parts.findIndex((part) => rankOf(part) === 0)
-  return { drawing, relation: index < 0 ? undefined : drawing.starts[index], related: index === 0 }
+  return { parts, drawing, relation: index < 0 ? undefined : drawing.starts[index], related: index === 0 }
 }
 
 /** Before which part to break: the last place that leaves the row within the width, the strongest kind of place first. */
@@ -110,8 +111,12 @@ function continued(parts: readonly Element[]): readonly Element[] {
 function open(parts: readonly Element[], drawing: Drawing, width: number): readonly Element[] | undefined {
   const crossing = parts.findIndex((_, index) => (drawing.starts[index + 1] ?? drawing.width) > width)
   for (let index = crossing; index >= 0; index -= 1) {
-    const inner = contents(parts[index]!)
-    if (inner) return [...parts.slice(0, index), ...inner, ...parts.slice(index + 1)]
+    const opened = contents(parts[index]!)
+    if (opened === undefined) continue
+    // A fraction that is multiplied further is bracketed, so that the factor is not read as part of what is below.
+    const factor = parts[index]!.name === 'mfrac' && /^[×\u2062]$/.test(parts[index + 1]?.text ?? '')
+    const inner = factor ? [leaf('mo', '('), ...opened, leaf('mo', ')')] : opened
+    return [...parts.slice(0, index), ...inner, ...parts.slice(index + 1)]
   }
   return undefined
 }
@@ -156,8 +161,8 @@ function closes(parts: readonly Element[]): boolean {
   return parts.every((part, index) => {
     if (part.name === 'mo' && /^[([{]$/.test(part.text)) depth += 1
     if (part.name === 'mo' && /^[)\]}]$/.test(part.text)) depth -= 1
-    return depth > 0 || index === parts.length - 1
+    return index === parts.length - 1 ? depth === 0 : depth > 0
   })
 }
 
-const isLeaf = (part: Element): boolean => /^(mi|mn|mtext|msub)$/.test(part.name)
+const isLeaf = (part: Element): boolean => /^(mi|mn|mo|mtext|msub)$/.test(part.name)

@@ -64,6 +64,8 @@ function broken(pen: Pen, word: string, style: Style, width: number): string[] {
     let count = 0
     let used = 0
     while (count < rest.length && (used += widthOf(pen, rest[count]!, style)) <= width) count += 1
+    // Side by side letters may stand a little farther apart than each by itself.
+    while (count > 1 && widthOf(pen, rest.slice(0, count).join(''), style) > width) count -= 1
     if (count === rest.length) return [...pieces, rest.join('')]
     const after = rest.slice(0, count).findLastIndex((letter) => /[-/._,;:\\–—]/.test(letter)) + 1
     const cut = Math.max(1, after > count / 2 ? after : count)

@@ -7,13 +7,16 @@ import { flow, type Slab } from '../../app/print/flow.ts'
 import { formulaRows } from '../../app/print/formula-rows.ts'
 import { typeset } from '../../app/print/formula.ts'
 import { frameOf, STYLE } from '../../app/print/hand.ts'
-import { mathOf, partsOf } from '../../app/print/mathml.ts'
+import { mathOf, partsOf, type Element } from '../../app/print/mathml.ts'
 import { widthOf, type Pen } from '../../app/print/pen.ts'
 import { wrap, wrapAtMost } from '../../app/print/text.ts'
 import { lines } from './sample.ts'
 
 const doc = new PDFDocument({ font: faceFile('regular') })
 const pen: Pen = { doc, faces: facesOf(doc), frame: frameOf('a4'), root: doc.struct('Document'), glyph: () => '' }
+
+const leaves = (parts: readonly Element[]): readonly string[] =>
+  parts.flatMap(({ text, children }) => (children.length === 0 ? [text] : leaves(children)))
 
 describe('formulas', () => {
   test('know where each part of a row begins', () => {
@@ -33,7 +36,15 @@ describe('formulas', () => {
       .filter((parts) => parts.length > 0)
     fc.assert(
       fc.property(fc.constantFrom(...formulas), fc.integer({ min: 12000, max: 40000 }), (parts, width) => {
-        for (const { drawing } of formulaRows(parts, () => width)) expect(drawing.width).toBeLessThanOrEqual(width)
+        const rows = formulaRows(parts, () => width)
+        for (const { drawing } of rows) expect(drawing.width).toBeLessThanOrEqual(width)
+        // No figure is lost, none stands twice, and brackets close as often as they open.
+        const [before, after] = [leaves(parts), rows.flatMap((row) => leaves(row.parts))]
+        const figures = (texts: readonly string[]): string =>
+          texts.filter((text) => /^[\d.,]{3,}$/.test(text)).join(' ')
+        expect(figures(after)).toBe(figures(before))
+        const count = (sign: RegExp): number => after.filter((text) => sign.test(text)).length
+        expect(count(/^[([{]$/)).toBe(count(/^[)\]}]$/))
       }),
       { numRuns: 40 },
     )

@@ -1,5 +1,5 @@
 /** The cranes in an elevation: wheels on the rail and over them the end trucks, from bumper to bumper. */
-import type { Review } from '../review/types.ts'
+import type { DrawnReview } from '../review/values.ts'
 import { EDGE } from './layout.ts'
 import type { Scale, StandingWheel } from './standing.ts'
 import type { Item } from './types.ts'
@@ -18,7 +18,7 @@ export const blockAbove = (radius: number): number => radius * 1.7
 
 /** Blocks and wheels over a rail whose head is at height `head`; wheels outside the view are not drawn. */
 export const bridges = (
-  review: Review,
+  review: DrawnReview,
   wheels: readonly StandingWheel[],
   scale: Scale,
   head: number,

@@ -2,7 +2,7 @@
 import { as } from '../quantity/kinds.ts'
 import { shownUnit } from '../quantity/units.ts'
 import { writeQuantity, writeUnit } from '../quantity/write.ts'
-import type { Review } from '../review/types.ts'
+import type { DrawnReview } from '../review/values.ts'
 import { envelopeCurve } from '../travel/envelope.ts'
 import { spanOf } from '../travel/influence.ts'
 import type { Extreme } from '../travel/types.ts'
@@ -22,7 +22,7 @@ const PARTS = 96
  * is drawn downward, on the side in tension. Loads as shown: static ones have the envelope of all trains, others that of their own
  * train; uniform load and end moments count in both. The greatest moment at this position is marked. Stations as in the elevation.
  */
-export const momentFigure = (review: Review, extreme: Extreme, shown: Shown): Figure => {
+export const momentFigure = (review: DrawnReview, extreme: Extreme, shown: Shown): Figure => {
   const state = stateOf(review, extreme, shown)
   const present = state.stations.map((x): Ordinate => ({ x, value: state.moment(x) }))
   const envelope = state.curve.map(({ x, moment }) => ({ x, ...moment }))
@@ -40,7 +40,7 @@ export const momentFigure = (review: Review, extreme: Extreme, shown: Shown): Fi
 }
 
 /** The same for shear, positive upward; at a wheel both sides are drawn. The extreme's own shear, or else the greatest, is marked. */
-export const shearFigure = (review: Review, extreme: Extreme, shown: Shown): Figure => {
+export const shearFigure = (review: DrawnReview, extreme: Extreme, shown: Shown): Figure => {
   const state = stateOf(review, extreme, shown)
   // A wheel at a support stands just within the span, as travel reads it: the base line's end has the whole reaction.
   const present = state.stations.flatMap((x) => {
@@ -75,7 +75,7 @@ interface Diagram {
 }
 
 /** Statics of the span at the extreme's position, distances from its left support in m. */
-const stateOf = (review: Review, extreme: Extreme, shown: Shown) => {
+const stateOf = (review: DrawnReview, extreme: Extreme, shown: Shown) => {
   const beam = beamOf(review)
   const { start, length } = spanOf(beam, extreme.span)
   const { uniform = 0, ends: [endLeft, endRight] = [0, 0], loads } = shown
@@ -143,14 +143,18 @@ const level = (
 const ascending = (list: readonly number[]): readonly number[] => [...new Set(list)].sort((a, b) => a - b)
 
 /** Static loads are those of every train; other loads are known of the extreme's own train only. */
-const trainsOf = (review: Review, extreme: Extreme, loads: readonly number[] | undefined): Review['trains'] => {
+const trainsOf = (
+  review: DrawnReview,
+  extreme: Extreme,
+  loads: readonly number[] | undefined,
+): DrawnReview['trains'] => {
   if (loads === undefined) return review.trains
   const own = extreme.train === undefined ? undefined : review.trains[extreme.train]
   if (own === undefined) return []
   return [{ ...own, wheels: own.wheels.map((wheel, i) => ({ ...wheel, load: as('force', loads[i]!) })) }]
 }
 
-const draw = (review: Review, extreme: Extreme, shown: Shown, diagram: Diagram): Figure => {
+const draw = (review: DrawnReview, extreme: Extreme, shown: Shown, diagram: Diagram): Figure => {
   const { units, width } = shown
   const { kind, down, present, envelope, mark } = diagram
   const scale = scaleOf(review, extreme, shown)

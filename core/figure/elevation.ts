@@ -2,7 +2,7 @@
 import { spanOf } from '../travel/influence.ts'
 import type { MomentProof } from '../travel/proof.ts'
 import type { Extreme } from '../travel/types.ts'
-import type { Review } from '../review/types.ts'
+import type { DrawnReview } from '../review/values.ts'
 import { sectionName } from '../section/name.ts'
 import { BLOCK, blockAbove, bridges, inView, wheelRadius } from './bridge.ts'
 import { ABOVE, chain, distanceText, over, tick, type Mark } from './dimension.ts'
@@ -32,7 +32,7 @@ const ARROW = 9
  * distances of this wheel and of the resultant from midspan are drawn: equal where wheels act alone (core/travel/proof.ts).
  * The height follows from the contents. Throws RangeError for less than 120 mm or loads that do not fit the train.
  */
-export const elevationFigure = (review: Review, extreme: Extreme, shown: Shown): Figure => {
+export const elevationFigure = (review: DrawnReview, extreme: Extreme, shown: Shown): Figure => {
   const { units, width } = shown
   const wheels = wheelsAt(review, extreme, shown.loads)
   const scale = scaleOf(review, extreme, shown)
@@ -217,7 +217,12 @@ const proofLines = (proof: MomentProof, scale: Scale, midspan: number, underside
 }
 
 /** Ends of the span and every wheel in the view, each station once. */
-const marksOf = (review: Review, { span }: Extreme, seen: readonly StandingWheel[], scale: Scale): readonly Mark[] => {
+const marksOf = (
+  review: DrawnReview,
+  { span }: Extreme,
+  seen: readonly StandingWheel[],
+  scale: Scale,
+): readonly Mark[] => {
   const { start, length } = spanOf(beamOf(review), span)
   const stations = [start, start + length, ...seen.map(({ station }) => station)].sort((a, b) => a - b)
   const near = 1e-9 * (start + length)
@@ -235,7 +240,7 @@ const depthNote = (y: number): Text => ({
 })
 
 const altText = (
-  review: Review,
+  review: DrawnReview,
   extreme: Extreme,
   wheels: readonly StandingWheel[],
   resultant: Resultant | undefined,

@@ -1,5 +1,5 @@
 /** The runway itself in an elevation: girders, rail, bearings and supports, to scale. */
-import type { Review } from '../review/types.ts'
+import type { DrawnReview } from '../review/values.ts'
 import { SIDE, type Scale } from './standing.ts'
 import type { Item, Point } from './types.ts'
 
@@ -29,7 +29,7 @@ export interface Girders {
 }
 
 /** Heights of rail and girder on paper; what would be a hairline or fill the page is drawn thicker or shallower. */
-export const heightsOf = (review: Review, { perMetre }: Scale) => {
+export const heightsOf = (review: DrawnReview, { perMetre }: Scale) => {
   const { section, job } = review
   const scaled = section.depth * perMetre
   const depth = Math.min(Math.max(scaled, SHALLOWEST), DEEPEST)
@@ -38,7 +38,7 @@ export const heightsOf = (review: Review, { perMetre }: Scale) => {
 }
 
 /** The runway with the top of its girders at height `top` on paper. */
-export const girders = (review: Review, scale: Scale, top: number, width: number): Girders => {
+export const girders = (review: DrawnReview, scale: Scale, top: number, width: number): Girders => {
   const { section, job } = review
   const { across, view } = scale
   const { depth, rail, toScale } = heightsOf(review, scale)

@@ -1,6 +1,6 @@
 /** A train as it stands on the runway at an extreme, and the runway's stations on paper. */
 import { as, type Metre, type NewtonMetre, type NewtonPerMetre, type UnitSystem } from '../quantity/kinds.ts'
-import type { Review } from '../review/types.ts'
+import type { DrawnReview } from '../review/values.ts'
 import { spanOf } from '../travel/influence.ts'
 import { stationsOf } from '../travel/place.ts'
 import { momentProof, type MomentProof } from '../travel/proof.ts'
@@ -45,7 +45,11 @@ export interface StandingWheel {
 }
 
 /** The wheels of an extreme's train from left to right. Throws RangeError where the loads do not fit the train. */
-export const wheelsAt = (review: Review, extreme: Extreme, loads?: readonly number[]): readonly StandingWheel[] => {
+export const wheelsAt = (
+  review: DrawnReview,
+  extreme: Extreme,
+  loads?: readonly number[],
+): readonly StandingWheel[] => {
   if (extreme.train === undefined) return []
   const train = review.trains[extreme.train]
   if (train === undefined) throw new RangeError(`train ${extreme.train} of ${review.trains.length} does not exist`)
@@ -68,10 +72,10 @@ export const wheelsAt = (review: Review, extreme: Extreme, loads?: readonly numb
   return wheels.sort((a, b) => a.station - b.station || a.index - b.index)
 }
 
-export const beamOf = ({ job }: Review): Beam => ({ continuity: job.runway.continuity, spans: job.runway.spans })
+export const beamOf = ({ job }: DrawnReview): Beam => ({ continuity: job.runway.continuity, spans: job.runway.spans })
 
 /** The extreme's span with as much of its neighbours, a span's length at most, as the train's wheels reach over. */
-export const viewOf = (review: Review, extreme: Extreme): View => {
+export const viewOf = (review: DrawnReview, extreme: Extreme): View => {
   const { start, length } = spanOf(beamOf(review), extreme.span)
   const stations = wheelsAt(review, extreme).map(({ station }) => station)
   return {
@@ -89,7 +93,11 @@ export interface Scale {
 }
 
 /** Throws RangeError for a figure too narrow or a view that does not hold the extreme's whole span. */
-export const scaleOf = (review: Review, extreme: Extreme, { view = viewOf(review, extreme), width }: Shown): Scale => {
+export const scaleOf = (
+  review: DrawnReview,
+  extreme: Extreme,
+  { view = viewOf(review, extreme), width }: Shown,
+): Scale => {
   if (!(width >= LEAST_WIDTH && width < Infinity)) throw new RangeError(`a figure of ${width} mm`)
   const { start, length } = spanOf(beamOf(review), extreme.span)
   const near = 1e-9 * (start + length)
@@ -104,7 +112,7 @@ export const scaleOf = (review: Review, extreme: Extreme, { view = viewOf(review
  * where cranes stand apart: then one moment alone was not what was made worst.
  */
 export const proofAt = (
-  review: Review,
+  review: DrawnReview,
   extreme: Extreme,
   wheels: readonly StandingWheel[],
   { uniform = as('lineLoad', 0), ends = [as('moment', 0), as('moment', 0)] }: Shown,
@@ -126,5 +134,5 @@ export const proofAt = (
 }
 
 /** "wheel 2", or "wheel 2 of crane 1" where there are several. */
-export const wheelName = (review: Review, { crane, wheel }: StandingWheel): string =>
+export const wheelName = (review: DrawnReview, { crane, wheel }: StandingWheel): string =>
   `wheel ${wheel + 1}${review.job.cranes.length > 1 ? ` of crane ${crane + 1}` : ''}`

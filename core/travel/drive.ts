@@ -2,7 +2,7 @@
 import { as } from '../quantity/kinds.ts'
 import type { WheelTrain } from '../crane/types.ts'
 import { greatestDeflection } from './deflection.ts'
-import { deflectionLine, spanOf, withinSpan, type Influence } from './influence.ts'
+import { deflectionLine, ordinateAt, spanOf, withinSpan, type Influence } from './influence.ts'
 import { driveMoments } from './moments.ts'
 import { inOrder, onSpan, placed, stationsOf, waysOf, worse, type Way } from './place.ts'
 import { driveBracket, driveEnd, driveShear } from './reactions.ts'
@@ -58,7 +58,7 @@ const driveDeflection = (
   const on = onSpan(beam, span, stations)
   const standing = standingOf(length, on, wheels, 0)
   const line = deflectionLine(beam, span, start + found.at, stiffness)
-  const again = on.reduce((sum, { wheel, x }) => sum + wheels[wheel]! * ordinate(line, start + x), 0)
+  const again = on.reduce((sum, { wheel, x }) => sum + wheels[wheel]! * ordinateAt(line, start + x), 0)
   proveEquilibrium(standing, found.at)
   proveValue(found.value, again, Math.abs(again))
   return {
@@ -102,19 +102,6 @@ const stand = (
     with: { moment: as('moment', moment), shear: as('force', shearAt(standing, x)) },
     method: 'exact',
   }
-}
-
-const ordinate = ({ breaks, polynomials }: Influence, station: number): number => {
-  const piece = Math.max(
-    0,
-    Math.min(
-      breaks.findLastIndex((at) => at <= station),
-      polynomials.length - 1,
-    ),
-  )
-  const t = station - breaks[piece]!
-  const [a, b, c, d] = polynomials[piece]!
-  return a + t * (b + t * (c + t * d))
 }
 
 const checkEffect = (effect: Effect, train: WheelTrain | undefined): void => {

@@ -112,3 +112,17 @@ const pieces = (list: readonly (readonly [at: number, piece: Cubic | undefined])
   }
   return { breaks, polynomials }
 }
+
+/** Ordinate of a line at a station of the runway; beyond its ends that of its end. */
+export const ordinateAt = ({ breaks, polynomials }: Influence, station: number): number => {
+  const piece = Math.max(
+    0,
+    Math.min(
+      breaks.findLastIndex((at) => at <= station),
+      polynomials.length - 1,
+    ),
+  )
+  const t = station - breaks[piece]!
+  const [a, b, c, d] = polynomials[piece]!
+  return a + t * (b + t * (c + t * d))
+}

@@ -23,9 +23,10 @@ export function entriesSlabs(pen: Pen, rows: readonly Entry[]): readonly Slab[] 
   let table: Tag | undefined
   return rows.flatMap((entry, index): Slab[] => {
     const style = entry.isDefault ? { ...STYLE.cell, colour: COLOUR.grey } : STYLE.cell
+    const values = wrap(pen, entry.value, STYLE.cell, valueWidth)
     const columns = [
       { lines: wrap(pen, entry.label, STYLE.cell, labelWidth), style: STYLE.cell, x: left, type: 'TH', end: 0 },
-      { lines: valueLines(pen, entry.value, valueWidth), style, x: valueX, type: 'TD', end: valueX + valueWidth },
+      { lines: values, style, x: valueX, type: 'TD', end: valueX + valueWidth },
       {
         lines: wrap(pen, sourceOf(entry), STYLE.clause, right - sourceX),
         style: STYLE.clause,
@@ -47,11 +48,13 @@ export function entriesSlabs(pen: Pen, rows: readonly Entry[]): readonly Slab[] 
         gap: index === 0 && part === 0 ? 4 : 0,
         keep: !last && (index === 0 || index === rows.length - 2),
         draw: (_, top) => {
-          const foot = top + tall - 1
+          const ends = values.length > from && values.length <= to
+          const foot = top + PAD + (values.length - from) * STYLE.cell.leading + PAD - 1
           const dash = entry.isDefault ? [0.8, 1.8] : undefined
-          const colour = COLOUR.grey
-          if (to === count)
-            artifact(pen, 'Layout', () => rule(pen, [valueX, foot], [valueX + valueWidth, foot], colour, 0.5, dash))
+          if (ends)
+            artifact(pen, 'Layout', () => {
+              rule(pen, [valueX, foot], [valueX + valueWidth, foot], COLOUR.grey, 0.5, dash)
+            })
           table ??= openTag(pen, 'Table')
           row ??= table.child('TR')
           const line = row
@@ -59,7 +62,8 @@ export function entriesSlabs(pen: Pen, rows: readonly Entry[]): readonly Slab[] 
             const cell = cells[column] ?? line.child(type, type === 'TH' ? { scope: 'Row' } : {})
             const shown = lines.slice(from, to)
             cell.draw(() => {
-              if (end === 0 || shown.length > 1) writeLines(pen, shown, own, x, top + PAD)
+              // A short value stands at the right of its rule like a figure; words of several lines from the left.
+              if (end === 0 || lines.length > 1) writeLines(pen, shown, own, x, top + PAD)
               else if (shown[0] !== undefined)
                 write(pen, shown[0], own, end - widthOf(pen, shown[0], own), top + PAD + rise(own))
             })
@@ -73,9 +77,6 @@ export function entriesSlabs(pen: Pen, rows: readonly Entry[]): readonly Slab[] 
     })
   })
 }
-
-/** A short value stands at the right of its rule like a figure; words of several lines from the left. */
-const valueLines = (pen: Pen, value: string, width: number): string[] => wrap(pen, value, STYLE.cell, width)
 
 const sourceOf = ({ isDefault, source = '' }: Entry): string =>
   isDefault ? ['default', source].filter((word) => word !== '').join(', ') : source

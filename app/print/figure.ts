@@ -38,7 +38,7 @@ export function figureSlab(pen: Pen, { figure, caption }: Extract<Block, { block
   const wide = figure.width * scale
   const lines = caption === '' ? [] : wrap(pen, caption, STYLE.caption, right - left)
   return {
-    height: tall + (lines.length > 0 ? 5 + lines.length * STYLE.caption.leading : 0),
+    height: tall + (lines.length > 0 ? 5 + lines.length * STYLE.caption.leading : 0) + 4,
     gap: 10,
     keep: false,
     draw: (_, top) => {
@@ -58,7 +58,7 @@ export function figureSlab(pen: Pen, { figure, caption }: Extract<Block, { block
 /** Place for a seal and signature. */
 export function sealSlab(pen: Pen, text: string): Slab {
   const { left, body } = pen.frame
-  const [width, height] = [Math.min(240, body - left), 120]
+  const [width, height] = [Math.min(240, body - left), 104]
   const pad = 8
   const lines = wrap(pen, text, STYLE.note, width - 2 * pad)
   const tall = Math.max(height, lines.length * STYLE.note.leading + 2 * pad + 60)

@@ -25,6 +25,10 @@ export interface Placed {
   readonly head: boolean
 }
 
+/** Slabs of which the last one stays with what follows, where `keep` is true. */
+export const keptOn = (slabs: readonly Slab[], keep: boolean): readonly Slab[] =>
+  slabs.map((slab, index) => (keep && index === slabs.length - 1 ? { ...slab, keep } : slab))
+
 /**
  * Places slabs on pages of height `room`. Slabs that keep together go to the next page together; where even a whole page
  * does not hold them they are parted between slabs. A slab higher than a page is the fault of whoever made it and throws.

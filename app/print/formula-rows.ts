@@ -16,7 +16,7 @@ export interface FormulaRow {
 export type RowWidth = (related: boolean, index: number) => number
 
 /**
- * Sets parts in rows no wider than they may be, broken before relations first, then before plus and minus, then at products;
+ * Sets parts in rows no wider than they may be, or a little wider where that saves a fraction, broken before relations first, then before plus and minus, then at products;
  * a fraction, root or bracket that is wider than a row, or that would leave it mostly empty, is opened and broken inside.
  */
 export function formulaRows(parts: readonly Element[], widthOf: RowWidth): readonly FormulaRow[] {
@@ -27,13 +27,18 @@ export function formulaRows(parts: readonly Element[], widthOf: RowWidth): reado
     const drawing = set(rest)
     if (drawing.width <= width) return [...rows, rowOf(rest, drawing)]
     const cut = cutOf(rest, drawing, width)
-    const opened = cut === undefined || drawing.starts[cut]! < width * EMPTY ? open(rest, drawing, width) : undefined
-    if (opened) {
-      rest = opened
-      continue
+    const far = nextCut(rest, drawing, width)
+    let end = cut ?? far
+    if (cut === undefined || drawing.starts[cut]! < width * EMPTY) {
+      if ((drawing.starts[far] ?? drawing.width) * SMALLEST <= width) end = far
+      else {
+        const opened = open(rest, drawing, width)
+        if (opened) {
+          rest = opened
+          continue
+        }
+      }
     }
-    // A figure wider than the column cannot be broken: its row ends at the next place, and the page scales it.
-    const end = cut ?? nextCut(rest)
     const head = rest.slice(0, end)
     rows.push(rowOf(head, set(head)))
     rest = continued(rest.slice(end))
@@ -43,6 +48,8 @@ export function formulaRows(parts: readonly Element[], widthOf: RowWidth): reado
 
 /** A row filled less than this is mostly empty. */
 const EMPTY = 0.3
+/** What would fit at this share of its size is scaled by the page rather than opened. */
+const SMALLEST = 0.86
 
 const set = (parts: readonly Element[]): Drawing => {
   const text = mathOf(parts)
@@ -82,9 +89,11 @@ function cutOf(parts: readonly Element[], drawing: Drawing, width: number): numb
   return best
 }
 
-/** The first place of any kind; the end where there is none. */
-function nextCut(parts: readonly Element[]): number {
-  const next = parts.findIndex((part, index) => index > 0 && Number.isFinite(rankOf(part)))
+/** The first place beyond the width; the end where there is none. */
+function nextCut(parts: readonly Element[], drawing: Drawing, width: number): number {
+  const next = parts.findIndex(
+    (part, index) => index > 0 && drawing.starts[index]! > width && Number.isFinite(rankOf(part)),
+  )
   return next < 0 ? parts.length : next
 }
 

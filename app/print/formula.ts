@@ -39,7 +39,7 @@ export interface Drawing {
  */
 export function typeset(mathml: string): Drawing {
   const { convert, adaptor } = (jax ??= start())
-  const svg = adaptor.firstChild(convert(mathml)) as LiteElement
+  const svg = adaptor.firstChild(convert(mathml.replace('<math', `<math scriptminsize="${SMALLEST}em"`))) as LiteElement
   if (failures.length > 0) throw new Error(`parts of the typeface of formulas did not load: ${failures.join(', ')}`)
   const [, top = 0, width = 0, height = 0] = numbers(attributeOf(adaptor, svg, 'viewBox'))
   const found: Found = { marks: [], lacking: [] }
@@ -62,6 +62,9 @@ export function lackingIn(mathml: string): readonly string[] {
 }
 
 const drawable = new Map<string, boolean>()
+
+/** Scripts of scripts are not set smaller than this: a page is read by lamp light, and copied. */
+const SMALLEST = 0.6
 
 interface Place {
   readonly scaleX: number

@@ -5,7 +5,7 @@ import { glyphForms } from './draw-formula.ts'
 import { entriesSlabs } from './entries.ts'
 import { faceFile, facesOf } from './faces.ts'
 import { figureSlab, sealSlab } from './figure.ts'
-import { flow, type Slab } from './flow.ts'
+import { flow, keptOn, type Slab } from './flow.ts'
 import { furnitureOf } from './furniture.ts'
 import { frameOf, type Paper } from './hand.ts'
 import type { Pen } from './pen.ts'
@@ -45,10 +45,16 @@ export async function printSheet(sheet: Sheet, paper: Paper, options: PrintOptio
     const block = sheet.blocks[index]!
     const next = sheet.blocks[index + 1]
     if (block.block === 'working' && next?.block === 'verdict') {
-      slabs.push(...workingSlabs(pen, block.lines, next))
+      slabs.push(...workingSlabs(pen, block.lines, spaceAbove(sheet.blocks[index - 1]), next))
       ends.push(slabs.length)
       index += 1
-    } else slabs.push(...slabsOf(pen, block, outline, sheet.blocks[index - 1]))
+    } else {
+      const before = sheet.blocks[index - 1]
+      const own = slabsOf(pen, block, outline, before)
+      // What a heading is followed by leads over to the table, drawing or working that it speaks of.
+      const leads = block.block === 'paragraph' && before?.block === 'heading' && own.length <= LEADING_LINES
+      slabs.push(...keptOn(own, leads && next !== undefined && !PROSE.has(next.block)))
+    }
     ends.push(slabs.length)
     await step(index + 1)
   }
@@ -81,7 +87,7 @@ function slabsOf(pen: Pen, block: Block, outline: Outline, before: Block | undef
     case 'entries':
       return entriesSlabs(pen, block.rows)
     case 'working':
-      return workingSlabs(pen, block.lines)
+      return workingSlabs(pen, block.lines, spaceAbove(before))
     case 'verdict':
       return [verdictSlab(pen, block)]
     case 'figure':
@@ -90,6 +96,13 @@ function slabsOf(pen: Pen, block: Block, outline: Outline, before: Block | undef
       return [sealSlab(pen, block.text)]
   }
 }
+
+const LEADING_LINES = 4
+const PROSE: ReadonlySet<Block['block']> = new Set(['heading', 'paragraph', 'seal'])
+
+/** Above a working: more below a table or drawing than below the words that lead over to it. */
+const spaceAbove = (before: Block | undefined): number =>
+  before?.block === 'table' || before?.block === 'entries' || before?.block === 'figure' ? 10 : 5
 
 function newDocument(sheet: Sheet, paper: Paper): { readonly doc: PDFKit.PDFDocument; readonly pen: Pen } {
   const frame = frameOf(paper)

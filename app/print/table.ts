@@ -20,14 +20,21 @@ import { wrap } from './text.ts'
 
 const GUTTER = 10
 const PAD = 2.6
+/** A table lower than this share of a page is not parted. */
+const SHORT = 0.22
 
 /** A table over the whole width of the page. A row higher than a third of a page is parted between its lines. */
 export function tableSlabs(pen: Pen, { columns, rows, caption }: Extract<Block, { block: 'table' }>): readonly Slab[] {
   const { left, right, height } = pen.frame
-  const places = placesOf(columns, left, right)
+  const places = placesOf(
+    columns.map((column, index) => measured(column, rows, index)),
+    left,
+    right,
+  )
   const most = Math.max(1, Math.floor(height / 3 / STYLE.cell.leading))
   const head = headOf(pen, places)
   const parts = rows.flatMap((row) => partsOfRow(pen, row, places, most))
+  const short = parts.reduce((sum, part) => sum + part.height, 0) < height * SHORT
   let opened: Tag | undefined
   const table = (): Tag => (opened ??= openTag(pen, 'Table'))
   let row: Tag | undefined
@@ -59,8 +66,8 @@ export function tableSlabs(pen: Pen, { columns, rows, caption }: Extract<Block, 
     return {
       height: part.height,
       gap: 0,
-      // No row alone under its head or alone at the head of the next page.
-      keep: !last && (index === 0 || index === parts.length - 2),
+      // A short table stays whole; of a longer one no row stands alone at the foot or the head of a page.
+      keep: !last && (short || index === 0 || index === parts.length - 2),
       head: { height: head.height, draw: again },
       draw: (_, top) => {
         const foot = top + part.height
@@ -78,6 +85,10 @@ export function tableSlabs(pen: Pen, { columns, rows, caption }: Extract<Block, 
   })
   return [...captions, heading, ...body]
 }
+
+/** A column of utilisations begins with its rules, so its head stands at the left whatever its figures do. */
+const measured = (column: Column, rows: readonly (readonly Cell[])[], index: number): Column =>
+  rows.some((row) => typeof row[index] === 'object') ? { ...column, align: 'left' } : column
 
 interface Place {
   readonly column: Column

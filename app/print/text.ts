@@ -43,17 +43,22 @@ function wrapParagraph(pen: Pen, text: string, style: Style, width: number): str
   return [...lines, line].map((each) => each.trimEnd())
 }
 
-/** Words between spaces; a figure and its unit are one. */
+/** Words between spaces; a figure and its unit are one, feet and inches too. */
 function wordsOf(text: string): string[] {
   const words: string[] = []
   for (const word of text.split(' ')) {
     const before = words.at(-1)
-    if (before !== undefined && /\d$/.test(before) && UNIT.test(word)) words[words.length - 1] = `${before} ${word}`
+    if (before !== undefined && belong(before, word)) words[words.length - 1] = `${before} ${word}`
     else words.push(word)
   }
   return words
 }
 
+const belong = (before: string, word: string): boolean =>
+  (/\d$/.test(before) && UNIT.test(word)) || (/[\d'′]$/.test(before) && INCHES.test(word))
+
+/** Inches behind feet, a fraction behind a whole. */
+const INCHES = /^(\d+\/\d+|\d+(\.\d+)?["″])/
 const UNIT = /^(%|ft|in|kip|kips|ksi|ton|t|lb|mm|m|kN|MPa|(kip|kN|N|lb)[-·/](ft|in|m|mm))[.,;:)]*$/
 
 /** A word wider than a line, in parts: after a hyphen, a slash or a dot where there is one far enough along, else anywhere. */

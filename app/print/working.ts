@@ -1,7 +1,7 @@
 /** A working on paper: formula, values and result on one line where they fit, its clause in the column at the right. */
 import type { Line } from '../../core/formula/types.ts'
 import { drawFormula } from './draw-formula.ts'
-import type { Slab } from './flow.ts'
+import { keptOn, type Slab } from './flow.ts'
 import { formulaRows, type FormulaRow } from './formula-rows.ts'
 import { COLOUR, FORMULA_SIZE, STYLE, type Style } from './hand.ts'
 import { leaf, partsOf, type Element } from './mathml.ts'
@@ -15,11 +15,13 @@ export interface Verdict {
   readonly holds: boolean
 }
 
-/** The lines of a working; a verdict that follows stands behind the last one where there is room, else below. */
-export const workingSlabs = (pen: Pen, lines: readonly Line[], verdict?: Verdict): readonly Slab[] =>
-  lines.flatMap((line, index) =>
-    lineSlabs(pen, line, index === 0 ? 4 : 8, index === lines.length - 1 ? verdict : undefined),
-  )
+/** The lines of a working; a verdict that follows stands behind the last one where there is room, else below. `gap` is the space above the first. */
+export const workingSlabs = (pen: Pen, lines: readonly Line[], gap: number, verdict?: Verdict): readonly Slab[] =>
+  lines.flatMap((line, index) => {
+    const slabs = lineSlabs(pen, line, index === 0 ? gap : LINE_GAP, index === lines.length - 1 ? verdict : undefined)
+    // Neither its first line nor the one that it comes to stands alone on a page.
+    return index === 0 || index === lines.length - 2 ? keptOn(slabs, index < lines.length - 1) : slabs
+  })
 
 /** A verdict by itself. */
 export function verdictSlab(pen: Pen, verdict: Verdict, indent = 0): Slab {
@@ -41,6 +43,7 @@ const INDENT = 10
 /** Rows that go on stand under the first relation, unless it is as far out as this share of the column. */
 const FAR_OUT = 0.35
 const ROW_GAP = 7
+const LINE_GAP = 8
 
 function lineSlabs(pen: Pen, line: Line, gap: number, verdict: Verdict | undefined): readonly Slab[] {
   const room = pen.frame.body - pen.frame.left - INDENT

@@ -30,14 +30,14 @@ describe('formulas', () => {
       }
   })
 
-  test('fit their column at any width that holds their widest figure', () => {
+  test('fit their column, hardly scaled, at any width that holds their widest figure', () => {
     const formulas = lines('us')
       .flatMap(({ symbols, values }) => [partsOf(symbols), partsOf(values)])
       .filter((parts) => parts.length > 0)
     fc.assert(
       fc.property(fc.constantFrom(...formulas), fc.integer({ min: 12000, max: 40000 }), (parts, width) => {
         const rows = formulaRows(parts, () => width)
-        for (const { drawing } of rows) expect(drawing.width).toBeLessThanOrEqual(width)
+        for (const { drawing } of rows) expect(drawing.width * 0.86).toBeLessThanOrEqual(width)
         // No figure is lost, none stands twice, and brackets close as often as they open.
         const [before, after] = [leaves(parts), rows.flatMap((row) => leaves(row.parts))]
         const figures = (texts: readonly string[]): string =>

@@ -32,7 +32,7 @@ export const stationsOf = (train: WheelTrain | undefined, mirrored: boolean, lea
   train === undefined ? [] : train.wheels.map(({ offset }) => (mirrored ? lead - offset : lead + offset))
 
 /** Lead and direction of every crane, told by the stations of the train's wheels. */
-const positionsOf = (
+export const positionsOf = (
   train: WheelTrain | undefined,
   mirrored: boolean,
   stations: readonly number[],

@@ -1,0 +1,51 @@
+/** What the views of the window share. State lives in .svelte.ts classes beside this file, apart from markup. */
+import type { Line } from '../../core/formula/types.ts'
+import type { Finding } from '../../core/job/read.ts'
+import type { UnitSystem } from '../../core/quantity/kinds.ts'
+import type { ReviewValues } from '../../core/review/values.ts'
+import type { Metre } from '../../core/quantity/kinds.ts'
+
+/** The job as it is being written: the JSON tree of the job file, every entry as it was typed. */
+export interface JobState {
+  /** Reactive. The whole file as text, what the worker reviews and the desk keeps. */
+  readonly text: string
+  readonly units: UnitSystem
+  /** Value typed at a path ("cranes[0].ratedCapacity"), or undefined where it was left out. */
+  entry(path: string): string | undefined
+  /** Sets what was typed; '' takes it out again, so that the default holds. */
+  enter(path: string, typed: string): void
+  readonly cranes: number
+  addCrane(): void
+  removeCrane(index: number): void
+  setUnits(units: UnitSystem): void
+  /** Takes a whole job file in; says why not where it is none, and leaves the job as it was. */
+  open(text: string): string | undefined
+  /** Findings of the last review that ran on exactly this text, by path. */
+  readonly findings: ReadonlyMap<string, Finding>
+}
+
+/** The last review that held, and whether a newer text is waiting or refused. */
+export interface ReviewState {
+  /** Reactive: undefined until the first job was reviewed. Stays the last good one while an entry is wrong. */
+  readonly review: ReviewValues | undefined
+  readonly stale: boolean
+  readonly fault: string | undefined
+  /** Lines of the chosen check's derivation; undefined while they are being made. */
+  readonly working: readonly Line[] | undefined
+  /** Id of the check chosen in the ledger. */
+  readonly chosen: string | undefined
+  choose(id: string): void
+}
+
+/** Where the crane stands in the elevation. */
+export interface StandState {
+  readonly span: number
+  readonly train: number
+  readonly lead: Metre
+  readonly mirrored: boolean
+  /** Station at which the diagrams are read. */
+  readonly station: Metre
+  /** Stands the train where an effect governs. */
+  at(extreme: { span: number; train: number | undefined; lead: Metre; mirrored: boolean; station: Metre }): void
+  moveTo(lead: Metre): void
+}

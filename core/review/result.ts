@@ -108,6 +108,7 @@ const assemble = (review: Review) => {
         sideThrustPerWheel: sideThrustPerWheel.map(({ value }) => value),
         longitudinal: longitudinal.value,
       })),
+      deadLoad: review.deadLoad.value.value,
       combinations: review.combinations.map(({ name: combination, clause, text }) => ({
         name: combination,
         clause,

@@ -45,6 +45,7 @@ export function review(job: Job): Review {
       longitudinal: { kind: 'force', value: longitudinal },
       working,
     })),
+    deadLoad: { value: { kind: 'lineLoad', value: design.dead }, working: design.deadWorking },
     combinations: combinationsOf(basis.method).map(({ name, clause, text }) => ({
       name,
       clause: citation(clause),

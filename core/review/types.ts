@@ -63,6 +63,8 @@ export interface Review {
   readonly trains: readonly WheelTrain[]
   readonly envelope: StaticEnvelope
   readonly actions: readonly CraneActions[]
+  /** Girder, rail and what was added, over the whole length. */
+  readonly deadLoad: { readonly value: Quantity<'lineLoad'>; readonly working: Working }
   readonly combinations: readonly { readonly name: string; readonly clause: string; readonly text: string }[]
   readonly checks: readonly Check[]
   /** Id of the check with the greatest utilisation. */

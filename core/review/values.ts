@@ -9,9 +9,10 @@ export interface CheckValues extends Omit<Check, 'working' | 'places'> {
   readonly derived: boolean
 }
 
-export interface ReviewValues extends Omit<Review, 'wheels' | 'actions' | 'checks'> {
+export interface ReviewValues extends Omit<Review, 'wheels' | 'actions' | 'deadLoad' | 'checks'> {
   readonly wheels: readonly Omit<CraneWheels, 'working'>[]
   readonly actions: readonly Omit<CraneActions, 'working'>[]
+  readonly deadLoad: Omit<Review['deadLoad'], 'working'>
   readonly checks: readonly CheckValues[]
 }
 
@@ -24,6 +25,7 @@ export function valuesOf(review: Review): ReviewValues {
     ...review,
     wheels: review.wheels.map(({ working: _working, ...rest }) => rest),
     actions: review.actions.map(({ working: _working, ...rest }) => rest),
+    deadLoad: { value: review.deadLoad.value },
     checks: review.checks.map(({ working, places, ...rest }) => ({
       ...rest,
       derived: working !== undefined,

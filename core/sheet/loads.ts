@@ -6,7 +6,7 @@ import { heading, left, plain, right, shown } from './block.ts'
 import type { Block } from './types.ts'
 
 export function loadsPart(review: Review, units: UnitSystem, number: string): readonly Block[] {
-  const { job, wheels, actions, combinations } = review
+  const { job, wheels, actions, deadLoad, combinations } = review
   const force = (value: number | undefined): string =>
     shown(value === undefined ? undefined : { kind: 'force', value: as('force', value) }, units)
   const blocks: Block[] = [heading(1, number, 'Cranes and wheel loads')]
@@ -38,7 +38,9 @@ export function loadsPart(review: Review, units: UnitSystem, number: string): re
     )
   })
   blocks.push(
-    heading(2, `${number}.${job.cranes.length + 1}`, 'Combinations'),
+    heading(2, `${number}.${job.cranes.length + 1}`, 'Dead load'),
+    { block: 'working', lines: writeWorking(deadLoad.working, units) },
+    heading(2, `${number}.${job.cranes.length + 2}`, 'Combinations'),
     ...combinations.map(({ name, clause, text }) => plain(`${name}: ${text}.`, clause)),
   )
   return blocks

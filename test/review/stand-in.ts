@@ -133,6 +133,7 @@ export const standIn: Review = {
       working: { steps: [] },
     },
   ],
+  deadLoad: { value: { kind: 'lineLoad', value: as('lineLoad', 1500) }, working: { steps: [] } },
   combinations: [{ name: '1.2D + 1.6L', clause: 'ASCE 7-22 2.3.1', text: 'dead load 1.2, crane 1.6' }],
   checks: [holding, failing, open, idle],
   governing: 'us.flexure.major',

@@ -41,6 +41,11 @@ export interface Design {
   readonly cautions: readonly string[]
 }
 
+const DEAD = chapter('statics').formula('dead load', {
+  gives: ['g', 'lineLoad'],
+  where: { g_girder: 'lineLoad', g_rail: 'lineLoad', g_added: 'lineLoad' },
+  text: 'g_girder + g_rail + g_added',
+})
 const cranes = chapter('ASCE 7-22', '4.9')
 const WHEEL = cranes.formula('4.9.3', {
   gives: ['P', 'force'],
@@ -100,7 +105,7 @@ export const designOf = (
   const ownWeight = on.given('g_girder', 'lineLoad', as('lineLoad', section.massPerLength * STANDARD_GRAVITY), 'girder')
   const rail = on.given('g_rail', 'lineLoad', as('lineLoad', runway.rail.massPerLength * STANDARD_GRAVITY), 'rail')
   const added = on.given('g_added', 'lineLoad', girder.addedDeadLoad, 'added dead load')
-  const dead = on.given('g', 'lineLoad', as('lineLoad', ownWeight + rail + added), 'dead load')
+  const dead = on.take(DEAD, { g_girder: ownWeight, g_rail: rail, g_added: added })
   const eccentricity = runway.rail.eccentricity ?? as('length', 0.75 * section.tw)
   const steels = [girder.steel, girder.capSteel, girder.plateSteel].filter((steel) => steel !== undefined)
   const weakest = steels.reduce((a, b) => (b.fy < a.fy ? b : a))

@@ -34,7 +34,10 @@ export interface ReviewState {
   readonly working: readonly Line[] | undefined
   /** Id of the check chosen in the ledger. */
   readonly chosen: string | undefined
-  choose(id: string): void
+  /** Which of the chosen check's places `working` derives: 0 the worst, then the check's other places in their order. */
+  readonly place: number
+  /** Chooses a check, at its worst place unless another is named. */
+  choose(id: string, place?: number): void
 }
 
 /** Where the crane stands in the elevation. */

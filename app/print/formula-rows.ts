@@ -63,7 +63,7 @@ const set = (parts: readonly Element[]): Drawing => {
 
 /** Formulas set before; a sheet sets the same symbols for every place of a check. */
 const memory = new Map<string, Drawing>()
-const REMEMBERED = 2000
+const REMEMBERED = 600
 
 const rowOf = (parts: readonly Element[], drawing: Drawing): FormulaRow => {
   const index = parts.findIndex((part) => rankOf(part) === 0)

@@ -52,7 +52,7 @@ export async function printSheet(sheet: Sheet, paper: Paper, options: PrintOptio
       const before = sheet.blocks[index - 1]
       const own = slabsOf(pen, block, outline, before)
       // What a heading is followed by leads over to the table, drawing or working that it speaks of.
-      const leads = block.block === 'paragraph' && before?.block === 'heading' && own.length <= LEADING_LINES
+      const leads = block.block === 'paragraph' && before?.block === 'heading' && own.length === 1
       slabs.push(...keptOn(own, leads && next !== undefined && !PROSE.has(next.block)))
     }
     ends.push(slabs.length)
@@ -97,7 +97,6 @@ function slabsOf(pen: Pen, block: Block, outline: Outline, before: Block | undef
   }
 }
 
-const LEADING_LINES = 4
 const PROSE: ReadonlySet<Block['block']> = new Set(['heading', 'paragraph', 'seal'])
 
 /** Above a working: more below a table or drawing than below the words that lead over to it. */

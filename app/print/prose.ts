@@ -32,7 +32,7 @@ export function headingSlab(
   }
 }
 
-/** A paragraph, which may go on over pages; never one line of it alone at the foot or the head of one. */
+/** A paragraph; a long one may go on over pages, never with one line alone at the foot or the head of one. */
 export function paragraphSlabs(
   pen: Pen,
   {
@@ -46,30 +46,36 @@ export function paragraphSlabs(
   const { left, body } = pen.frame
   const lines = wrap(pen, text, style, body - left - indent)
   const beside = clause === undefined || clause === '' ? undefined : clauseBeside(pen, clause)
-  const short = lines.length * style.leading
   let tag: Tag | undefined
-  return lines.map((line, index) => {
-    const last = index === lines.length - 1
-    // The clause stands beside the first lines; a shorter paragraph makes room for all of it.
-    const height = last && beside ? Math.max(style.leading, beside.height - short + style.leading) : style.leading
+  return parted(lines.length, beside ? Math.ceil(beside.height / style.leading) : 0).map(([from, to]): Slab => {
+    const tall = (to - from) * style.leading
+    const height = from === 0 ? Math.max(tall, beside?.height ?? 0) : tall
     return {
       height,
-      gap: index === 0 ? 5 : 0,
-      // What stands beside the clause stays on its page.
-      keep: !last && (index === 0 || index === lines.length - 2 || (index + 1) * style.leading < (beside?.height ?? 0)),
+      gap: from === 0 ? 5 : 0,
+      keep: false,
       draw: (_, top) => {
         if (tone === 'caution')
-          artifact(pen, 'Layout', () =>
-            rule(pen, [left + 1.5, top], [left + 1.5, top + style.leading], COLOUR.accent, 2),
-          )
+          artifact(pen, 'Layout', () => {
+            rule(pen, [left + 1.5, top], [left + 1.5, top + tall], COLOUR.accent, 2)
+          })
         tag ??= openTag(pen, 'P')
-        const words = spaced(lines)[index]!
-        if (line !== '') tag.draw(() => write(pen, words, style, left + indent, top + rise(style)))
-        if (index === 0) beside?.draw(top, Math.max(beside.height, style.leading))
-        if (last) tag.end()
+        tag.draw(() => writeLines(pen, spaced(lines).slice(from, to), style, left + indent, top))
+        if (from === 0) beside?.draw(top, beside.height)
+        if (to === lines.length) tag.end()
       },
     }
   })
+}
+
+const WHOLE = 6
+
+/** Lines into runs that stay together: a short paragraph whole; of a longer one those beside its clause and the last two. */
+function parted(count: number, beside: number): readonly (readonly [from: number, to: number])[] {
+  const first = Math.max(2, beside)
+  if (count <= Math.max(WHOLE, first + 2)) return [[0, count]]
+  const single = Array.from({ length: count - first - 2 }, (_, index) => [first + index, first + index + 1] as const)
+  return [[0, first], ...single, [count - 2, count]]
 }
 
 export interface Beside {

@@ -12,6 +12,7 @@ import { review } from '../../core/review/review.ts'
 import { sectionOf } from '../../core/section/properties.ts'
 import { drive } from '../../core/travel/drive.ts'
 import { marchedMoment, type March } from './march.ts'
+import { printSpeed } from './print.ts'
 import { timed, type Row } from './timed.ts'
 
 const rows: Row[] = []
@@ -133,5 +134,10 @@ for (const { name, milliseconds, reference, ratio } of rows) {
   const figures = [milliseconds, reference, ratio].map((figure) => figure.toPrecision(3).padStart(10))
   console.log(`${name.padEnd(width)}  ${figures.join('  ')}`)
 }
+const printed = await printSpeed()
+console.log()
+for (const { name, value, unit } of printed)
+  console.log(`${name.padEnd(width)}  ${value.toPrecision(3).padStart(10)} ${unit}`)
+
 const json = process.argv.indexOf('--json')
-if (json > 0) writeFileSync(process.argv[json + 1]!, `${JSON.stringify(rows, null, 2)}\n`)
+if (json > 0) writeFileSync(process.argv[json + 1]!, `${JSON.stringify([...rows, ...printed], null, 2)}\n`)

@@ -1,64 +1,19 @@
 /** Nothing stands outside the margins, and no words stand on other words or formulas, found in the file itself. */
 import { describe, expect, test } from 'vitest'
-import { frameOf, type Paper } from '../../app/print/hand.ts'
+import type { Paper } from '../../app/print/hand.ts'
 import { printSheet } from '../../app/print/print.ts'
 import type { Sheet } from '../../core/sheet/types.ts'
-import { pagesOf, type Box, type Mark, type Page } from './reader.ts'
+import { faultsOf, outside, overlapping } from './faults.ts'
+import { pagesOf, type Mark, type Page } from './reader.ts'
 import { lines, manyWords, sampleSheet } from './sample.ts'
 
-/** Half the weight of the heaviest rule, and a little for rounding. */
-const EDGE = 1.2
-
-function outside({ marks }: Page, paper: Paper): readonly string[] {
-  const { left, right, top, bottom } = frameOf(paper)
-  return marks
-    .filter(
-      (mark) =>
-        mark.left < left - EDGE || mark.right > right + EDGE || mark.top < top - EDGE || mark.bottom > bottom + EDGE,
-    )
-    .map(described)
-}
-
-/** Words by themselves and formulas row by row, each pair that shares more than a hair. */
-function overlapping({ marks }: Page): readonly string[] {
-  const words = marks.filter(({ what, text }) => what === 'words' && text !== '')
-  const rows = new Map<number, Mark[]>()
-  for (const mark of marks.filter(({ what }) => what === 'glyph'))
-    rows.set(mark.group, [...(rows.get(mark.group) ?? []), mark])
-  const boxes: Mark[] = [...words, ...[...rows.values()].map(joined)]
-  const found: string[] = []
-  boxes.forEach((a, index) => {
-    for (const b of boxes.slice(index + 1)) if (share(a, b)) found.push(`${described(a)} and ${described(b)}`)
-  })
-  return found
-}
-
-const share = (a: Box, b: Box): boolean =>
-  Math.min(a.right, b.right) - Math.max(a.left, b.left) > 0.3 &&
-  Math.min(a.bottom, b.bottom) - Math.max(a.top, b.top) > 0.3
-
-const joined = (marks: readonly Mark[]): Mark => ({
-  ...marks[0]!,
-  text: `a formula of ${marks.length} glyphs`,
-  left: Math.min(...marks.map(({ left }) => left)),
-  right: Math.max(...marks.map(({ right }) => right)),
-  top: Math.min(...marks.map(({ top }) => top)),
-  bottom: Math.max(...marks.map(({ bottom }) => bottom)),
-})
-
-const described = ({ what, text, left, top }: Mark): string =>
-  `${what} "${text}" at ${left.toFixed(1)}, ${top.toFixed(1)}`
+const long = 'Drahtseilbahnoberbauinstandsetzungsgesellschaft/Nordwestdeutsche-Kranbahn '.repeat(6).trim()
 
 async function expectClean(sheet: Sheet, paper: Paper): Promise<readonly Page[]> {
   const pages = pagesOf(await printSheet(sheet, paper))
-  pages.forEach((page, index) => {
-    expect(outside(page, paper), `page ${index + 1}`).toEqual([])
-    expect(overlapping(page), `page ${index + 1}`).toEqual([])
-  })
+  expect(faultsOf(pages, paper)).toEqual([])
   return pages
 }
-
-const long = 'Drahtseilbahnoberbauinstandsetzungsgesellschaft/Nordwestdeutsche-Kranbahn '.repeat(6).trim()
 
 describe.each(['a4', 'letter'] as const)('on %s', (paper) => {
   test.each(['us', 'si'] as const)('the sample sheet in %s units', async (system) => {

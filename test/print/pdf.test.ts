@@ -8,6 +8,7 @@ import { NOT_KEPT } from '../../app/print/furniture.ts'
 import { printSheet } from '../../app/print/print.ts'
 import type { Sheet } from '../../core/sheet/types.ts'
 import { entry, listOf, nameOf, readPdf, stringOf, type Pdf, type Value } from './objects.ts'
+import { has } from './other-readers.ts'
 import { pagesOf } from './reader.ts'
 import { lines, manyWords, sampleSheet } from './sample.ts'
 
@@ -217,19 +218,7 @@ describe('other readers', () => {
         expect(text).toContain(part)
     })
   })
-
-  for (const tool of ['qpdf', 'pdftotext'])
-    if (!has(tool)) console.log(`${tool} is not on this machine: what it would find was not looked at`)
 })
-
-function has(tool: string): boolean {
-  try {
-    execFileSync(tool, [tool === 'qpdf' ? '--version' : '-v'], { stdio: 'ignore' })
-    return true
-  } catch {
-    return false
-  }
-}
 
 function withFile(use: (path: string) => void): void {
   const folder = mkdtempSync(join(tmpdir(), 'longtravel-print-'))

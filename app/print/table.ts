@@ -230,8 +230,7 @@ function utilisationContent(pen: Pen, { utilisation, word }: Exclude<Cell, strin
 }
 
 /** Three decimals; one over the limit is never rounded down to it. */
-export const utilisationText = (value: number): string =>
-  (value > 1 ? Math.ceil(value * 1000) / 1000 : value).toFixed(3)
+const utilisationText = (value: number): string => (value > 1 ? Math.ceil(value * 1000) / 1000 : value).toFixed(3)
 
 function drawBar(pen: Pen, utilisation: number, x: number, middle: number, width: number): void {
   const limit = x + width * LIMIT_AT

@@ -1,5 +1,4 @@
 /** The sample jobs as they are printed: on both papers and in both unit systems. */
-import { execFileSync } from 'node:child_process'
 import { readFileSync, readdirSync } from 'node:fs'
 import { describe, expect, test } from 'vitest'
 import { printSheet } from '../../app/print/print.ts'
@@ -7,7 +6,7 @@ import { checkText } from '../../app/command/check.ts'
 import { sheetOf } from '../../core/sheet/sheet.ts'
 import type { Sheet } from '../../core/sheet/types.ts'
 import { faultsOf } from './faults.ts'
-import { has } from './other-readers.ts'
+import { has, told } from './other-readers.ts'
 import { pagesOf, type Page } from './reader.ts'
 
 const folder = new URL('../../resources/jobs/', import.meta.url)
@@ -31,8 +30,7 @@ describe.each(readdirSync(folder))('%s', (file) => {
 
   test.skipIf(!has('pdftotext'))('another reader finds every value of its workings', async () => {
     const sheet = sheetOf(outcome.review, 'us')
-    const input = Buffer.from(await printSheet(sheet, 'a4'))
-    const text = squeezed(execFileSync('pdftotext', ['-', '-'], { input, encoding: 'utf8', maxBuffer: 2 ** 26 }))
+    const text = squeezed(told('pdftotext', await printSheet(sheet, 'a4')))
     const lines = sheet.blocks.flatMap((block) => (block.block === 'working' ? block.lines : []))
     const formulas = lines.filter(({ symbols, values }) => symbols + values !== '').map(formulaText)
     expect(formulas.length).toBeGreaterThan(50)

@@ -13,7 +13,6 @@ import { sectionOf } from '../../core/section/properties.ts'
 import { drive } from '../../core/travel/drive.ts'
 import { marchedMoment, type March } from './march.ts'
 import { printSpeed } from './print.ts'
-import { printSpeed } from './print.ts'
 import { timed, type Row } from './timed.ts'
 
 const rows: Row[] = []

@@ -54,11 +54,10 @@ function wordsOf(text: string): string[] {
   return words
 }
 
+/** A unit behind its figure, inches behind feet, a fraction behind a whole. */
 const belong = (before: string, word: string): boolean =>
-  (/\d$/.test(before) && UNIT.test(word)) || (/[\d'′]$/.test(before) && INCHES.test(word))
+  /\d$/.test(before) ? UNIT.test(word) || /^\d+\/\d/.test(word) : /\d['′]$/.test(before) && /^\d/.test(word)
 
-/** Inches behind feet, a fraction behind a whole. */
-const INCHES = /^(\d+\/\d+|\d+(\.\d+)?["″])/
 const UNIT = /^(%|ft|in|kip|kips|ksi|ton|t|lb|mm|m|kN|MPa|(kip|kN|N|lb)[-·/](ft|in|m|mm))[.,;:)]*$/
 
 /** A word wider than a line, in parts: after a hyphen, a slash or a dot where there is one far enough along, else anywhere. */

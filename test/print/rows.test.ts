@@ -107,8 +107,13 @@ describe('words', () => {
 
   test('keep a figure and its unit on one line', () => {
     for (let width = 60; width < 200; width += 7)
-      for (const line of wrap(pen, 'spans of 30 ft, 28 ft and 12 kip-ft at 25 %', STYLE.plain, width))
-        expect(line).not.toMatch(/^(ft|kip-ft|%)/)
+      for (const line of wrap(
+        pen,
+        'spans of 30 ft, 28 ft and 12 kip-ft at 25 %, to 26\' 7 13/16" and on',
+        STYLE.plain,
+        width,
+      ))
+        expect(line).not.toMatch(/^(ft|kip-ft|%|7|13)/)
   })
 
   test('end with an ellipsis where there are more lines than may be', () => {

@@ -1,4 +1,5 @@
 /** What the views of the window share. State lives in .svelte.ts classes beside this file, apart from markup. */
+import type { FromLive, ToLive } from '../../core/contract/live.ts'
 import type { Line } from '../../core/formula/types.ts'
 import type { Finding } from '../../core/job/read.ts'
 import type { UnitSystem } from '../../core/quantity/kinds.ts'
@@ -18,9 +19,13 @@ export interface JobState {
   addCrane(): void
   removeCrane(index: number): void
   setUnits(units: UnitSystem): void
+  /** Which of several forms a part of the job has: a name or dimensions, a rolled or a welded section (ways.ts). */
+  way(path: string): string
+  /** Changes the form; what stood in the other one is kept aside and comes back with it. */
+  turn(path: string, word: string): void
   /** Takes a whole job file in; says why not where it is none, and leaves the job as it was. */
   open(text: string): string | undefined
-  /** Findings of the last review that ran on exactly this text, by path. */
+  /** By path, of the last review's answer; those of an older text stand until the newer one is answered. */
   readonly findings: ReadonlyMap<string, Finding>
 }
 
@@ -28,6 +33,8 @@ export interface JobState {
 export interface ReviewState {
   /** Reactive: undefined until the first job was reviewed. Stays the last good one while an entry is wrong. */
   readonly review: ReviewValues | undefined
+  /** Time the last review took in the worker. */
+  readonly milliseconds: number | undefined
   readonly stale: boolean
   readonly fault: string | undefined
   /** Lines of the chosen check's derivation; undefined while they are being made. */
@@ -51,4 +58,12 @@ export interface StandState {
   /** Stands the train where an effect governs. */
   at(extreme: { span: number; train: number | undefined; lead: Metre; mirrored: boolean; station: Metre }): void
   moveTo(lead: Metre): void
+  readAt(station: Metre): void
+  chooseTrain(train: number): void
+}
+
+/** The way to the worker that reviews: posts asks, hands on answers. Tests stand another in its place. */
+export interface LivePort {
+  post(ask: ToLive): void
+  listen(answered: (answer: FromLive) => void): void
 }

@@ -1,5 +1,5 @@
 /** A review on a screen of plain text: the checks, worst first, what is not covered, the cautions. */
-import { writeFeetInches, writeNumber, writeQuantity } from '../../core/quantity/write.ts'
+import { writeFeetInches, writeQuantity, writeUtilisation } from '../../core/quantity/write.ts'
 import { as, type Quantity, type UnitSystem } from '../../core/quantity/kinds.ts'
 import { STANDING_CAUTIONS } from '../../core/review/cautions.ts'
 import type { Check, Place, Review } from '../../core/review/types.ts'
@@ -47,7 +47,7 @@ const checkLines = (checks: readonly Check[], { job }: Review): readonly string[
     check.title,
     citation(check.clause),
     comparison(check, job.units),
-    utilisation(check),
+    writeUtilisation(check.utilisation ?? 0),
     WORD[check.status],
   ])
   const lines = columns([['Check', 'Clause', 'Demand of resistance', 'Utilisation', ''], ...rows], [3])
@@ -73,10 +73,6 @@ const comparison = ({ demand, resistance }: Check, units: UnitSystem): string =>
 }
 
 /** Rounded up where the check fails, so that a failure never reads as 1.000. */
-const utilisation = ({ utilisation: value = 0, status }: Check): string => {
-  if (value >= 100) return writeNumber(value)
-  return (status === 'fails' ? Math.ceil(value * 1000) / 1000 : value).toFixed(3)
-}
 
 const placeText = ({ at, combination, set }: Place, spans: number, units: UnitSystem): string =>
   [at === undefined ? '' : stand(at, spans, units), combination ?? '', set ?? '']
@@ -110,7 +106,8 @@ const verdict = ({ ok, checks, governing }: Review): string => {
   const failing = checks.filter(({ status }) => status === 'fails')
   const open = checks.filter(({ status }) => status === 'not-covered')
   const worst = checks.find(({ id }) => id === governing)
-  const governs = worst === undefined ? '' : ` Governing: ${worst.title}, utilisation ${utilisation(worst)}.`
+  const governs =
+    worst === undefined ? '' : ` Governing: ${worst.title}, utilisation ${writeUtilisation(worst.utilisation ?? 0)}.`
   if (ok === false) return `${count(failing.length, 'check fails', 'checks fail')}.${governs}`
   if (ok === null)
     return `Nothing fails, but ${count(open.length, 'subject is', 'subjects are')} not covered.${governs}`

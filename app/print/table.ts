@@ -1,4 +1,5 @@
 /** Tables: rows on hairlines, the head again on every page, utilisations as rules against their limit. */
+import { writeUtilisation } from '../../core/quantity/write.ts'
 import type { Block, Cell, Column } from '../../core/sheet/types.ts'
 import type { Slab } from './flow.ts'
 import { COLOUR, STYLE, type Style } from './hand.ts'
@@ -223,14 +224,11 @@ function utilisationContent(pen: Pen, { utilisation, word }: Exclude<Cell, strin
       if (utilisation === null || from > 0) return
       drawBar(pen, utilisation, place.x, top + style.leading / 2, bar)
       const baseline = top + rise(style)
-      writeEnd(pen, utilisationText(utilisation), style, place.x + bar + FIGURE_WIDTH, baseline)
+      writeEnd(pen, writeUtilisation(utilisation), style, place.x + bar + FIGURE_WIDTH, baseline)
       if (beside) write(pen, ` ${word}`, style, place.x + bar + FIGURE_WIDTH + 6 - widthOf(pen, ' ', style), baseline)
     },
   }
 }
-
-/** Three decimals; one over the limit is never rounded down to it. */
-const utilisationText = (value: number): string => (value > 1 ? Math.ceil(value * 1000) / 1000 : value).toFixed(3)
 
 function drawBar(pen: Pen, utilisation: number, x: number, middle: number, width: number): void {
   const limit = x + width * LIMIT_AT

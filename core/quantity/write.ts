@@ -91,3 +91,10 @@ function superscript(text: string): string {
 }
 
 const SUPERSCRIPT = '⁰¹²³⁴⁵⁶⁷⁸⁹'
+
+/** A utilisation with three decimals; one over the limit is never rounded down to it, one within it never up to more. */
+export const writeUtilisation = (value: number): string => {
+  if (value >= 100) return writeNumber(value)
+  const rounded = value > 1 ? Math.ceil(value * 1000) / 1000 : Math.min(Math.round(value * 1000) / 1000, 1)
+  return rounded.toFixed(3)
+}

@@ -1,5 +1,6 @@
 /** First on the sheet: every check with its utilisation, what fails, what is not covered. */
 import type { UnitSystem } from '../quantity/kinds.ts'
+import { writeUtilisation } from '../quantity/write.ts'
 import { sectionName } from '../section/name.ts'
 import { citation } from '../sources/clause.ts'
 import type { Check, Review } from '../review/types.ts'
@@ -56,7 +57,7 @@ function verdict({ checks, governing, complete }: Review): string {
   const failing = checks.filter((check) => check.status === 'fails')
   const open = checks.filter((check) => check.status === 'not-covered').length
   const worst = checks.find((check) => check.id === governing)
-  const governs = worst === undefined ? '' : ` ${worst.title} governs with ${worst.utilisation!.toFixed(3)}.`
+  const governs = worst === undefined ? '' : ` ${worst.title} governs with ${writeUtilisation(worst.utilisation!)}.`
   const rest = complete
     ? ''
     : ` ${open} that ${open === 1 ? 'is' : 'are'} owed ${open === 1 ? 'is' : 'are'} not covered.`

@@ -4,6 +4,7 @@ import type { Line } from '../formula/types.ts'
 import type { Working } from '../formula/working.ts'
 import { writeWorking } from '../formula/write.ts'
 import type { UnitSystem } from '../quantity/kinds.ts'
+import { writeUtilisation } from '../quantity/write.ts'
 import type { Check, Review } from '../review/types.ts'
 import { citation } from '../sources/clause.ts'
 import { heading, plain } from './block.ts'
@@ -61,7 +62,7 @@ function workingOf(
   return [
     ...blocks,
     { block: 'working', lines: linesOf(check.working!(), units, printed, number) },
-    { block: 'verdict', text: `${holds ? 'holds' : 'fails'}, ${utilisation!.toFixed(3)}`, holds },
+    { block: 'verdict', text: `${holds ? 'holds' : 'fails'}, ${writeUtilisation(utilisation!)}`, holds },
   ]
 }
 

@@ -3,10 +3,24 @@ import { describe, expect, test } from 'vitest'
 import { DIMENSIONS, as, type Kind, type UnitSystem } from '../../core/quantity/kinds.ts'
 import { readQuantity } from '../../core/quantity/read.ts'
 import { UNITS_OF } from '../../core/quantity/unit-names.ts'
-import { writeExact, writeFeetInches, writeNumber, writeQuantity } from '../../core/quantity/write.ts'
+import { writeExact, writeFeetInches, writeNumber, writeQuantity, writeUtilisation } from '../../core/quantity/write.ts'
 
 const KINDS = Object.keys(DIMENSIONS) as Kind[]
 const SYSTEMS: readonly UnitSystem[] = ['us', 'si']
+
+describe('writeUtilisation', () => {
+  test.each([
+    [0, '0.000'],
+    [0.95044, '0.950'],
+    [0.9999, '1.000'],
+    [1, '1.000'],
+    [1.00001, '1.001'],
+    [1.1903, '1.191'],
+    [250.04, '250.0'],
+  ])('%s is written %s', (value, text) => {
+    expect(writeUtilisation(value)).toBe(text)
+  })
+})
 
 describe('writeNumber', () => {
   test.each([

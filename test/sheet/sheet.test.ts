@@ -2,6 +2,7 @@ import { readdirSync, readFileSync } from 'node:fs'
 import { describe, expect, it } from 'vitest'
 import { catalogue } from '../../core/catalogue/load.ts'
 import type { UnitSystem } from '../../core/quantity/kinds.ts'
+import { writeUtilisation } from '../../core/quantity/write.ts'
 import { STANDING_CAUTIONS } from '../../core/review/cautions.ts'
 import { reviewText } from '../../core/review/review-text.ts'
 import type { Review } from '../../core/review/types.ts'
@@ -55,7 +56,7 @@ describe.each(samples.flatMap((name) => (['us', 'si'] as const).map((units) => [
       const verdicts = only(sheet, 'verdict')
       expect(verdicts.map(({ holds }) => holds)).toEqual(judged.map(({ status }) => status === 'holds'))
       expect(verdicts.map(({ text }) => text.split(', ')[1])).toEqual(
-        judged.map(({ utilisation }) => utilisation!.toFixed(3)),
+        judged.map(({ utilisation }) => writeUtilisation(utilisation!)),
       )
       for (const { lines } of only(sheet, 'working')) expect(lines.length).toBeGreaterThan(0)
     })

@@ -7,8 +7,8 @@ import type { Design } from './design.ts'
 import { judge } from './judgement.ts'
 
 const practice = chapter('practice')
-const STIFFNESS = practice.formula('E I', {
-  gives: ['EI', 'flexuralStiffness'],
+const STIFFNESS = practice.formula('bending stiffness', {
+  gives: ['B', 'flexuralStiffness'],
   where: { E: 'stress', I: 'inertia' },
   text: 'E*I',
 })

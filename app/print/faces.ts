@@ -1,9 +1,11 @@
 /** The typefaces: IBM Plex Sans, whose figures are all of one width, and DejaVu Sans for signs that it lacks. */
 import { createRequire } from 'node:module'
+import { basename } from 'node:path'
+import { fileURLToPath } from 'node:url'
 import type { Face } from './hand.ts'
 
 /** Files inside their packages; TrueType, the one kind that is embedded without loss of time. */
-const FILES = {
+export const FILES = {
   regular: '@expo-google-fonts/ibm-plex-sans/400Regular/IBMPlexSans_400Regular.ttf',
   semibold: '@expo-google-fonts/ibm-plex-sans/600SemiBold/IBMPlexSans_600SemiBold.ttf',
   regularSigns: 'dejavu-fonts-ttf/ttf/DejaVuSans.ttf',
@@ -31,7 +33,11 @@ export interface Faces {
  */
 export const faceFile = (file: FaceFile): string => PATHS[file]
 
-const find = createRequire(import.meta.url).resolve
+/** In a bundle the files stand beside it: the build puts them there. */
+const find = (file: string): string =>
+  import.meta.url.endsWith('.ts')
+    ? createRequire(import.meta.url).resolve(file)
+    : fileURLToPath(new URL(basename(file), import.meta.url))
 const PATHS: Readonly<Record<FaceFile, string>> = {
   regular: find(FILES.regular),
   semibold: find(FILES.semibold),

@@ -1,5 +1,4 @@
 /** A formula as outlines: MathML typeset by MathJax, taken over glyph by glyph. Lengths in thousandths of an em, y upward. */
-import { createRequire } from 'node:module'
 import { MathJaxStix2Font } from '@mathjax/mathjax-stix2-font/js/svg.js'
 import { liteAdaptor, type LiteAdaptor } from '@mathjax/src/js/adaptors/liteAdaptor.js'
 import { LiteElement, type LiteNode } from '@mathjax/src/js/adaptors/lite/Element.js'
@@ -7,6 +6,7 @@ import { RegisterHTMLHandler } from '@mathjax/src/js/handlers/html.js'
 import { MathML } from '@mathjax/src/js/input/mathml.js'
 import { mathjax } from '@mathjax/src/js/mathjax.js'
 import { SVG } from '@mathjax/src/js/output/svg.js'
+import './glyphs.ts'
 
 type Box = readonly [x: number, y: number, width: number, height: number]
 
@@ -40,7 +40,6 @@ export interface Drawing {
 export function typeset(mathml: string): Drawing {
   const { convert, adaptor } = (jax ??= start())
   const svg = adaptor.firstChild(convert(mathml.replace('<math', `<math scriptminsize="${SMALLEST}em"`))) as LiteElement
-  if (failures.length > 0) throw new Error(`parts of the typeface of formulas did not load: ${failures.join(', ')}`)
   const [, top = 0, width = 0, height = 0] = numbers(attributeOf(adaptor, svg, 'viewBox'))
   const found: Found = { marks: [], lacking: [] }
   // The page of the library has y downward; its outermost group turns it round.
@@ -85,19 +84,10 @@ interface Jax {
 }
 
 let jax: Jax | undefined
-const failures: string[] = []
 
 function start(): Jax {
-  const require = createRequire(import.meta.url)
-  // Glyphs of rarer ranges are loaded when they are met; the library would swallow a failure and draw another glyph.
-  mathjax.asyncLoad = (name: string): unknown => {
-    try {
-      return require(name.replace('-font/svg/', '-font/js/svg/'))
-    } catch (error) {
-      failures.push(`${name} (${error instanceof Error ? error.message : String(error)})`)
-      throw error
-    }
-  }
+  // All glyphs are there already (glyphs.ts), so that there is nothing to load.
+  mathjax.asyncLoad = (): undefined => undefined
   mathjax.asyncIsSynchronous = true
   const adaptor = liteAdaptor()
   RegisterHTMLHandler(adaptor)

@@ -26,15 +26,17 @@ export const pageDesk = (place: Place): Desk => {
   const ending = Promise.withResolvers<CallError>()
   const token = tokenOf(place)
 
-  const post = async (path: string, body: unknown, signal: AbortSignal | undefined): Promise<Response> => {
-    const headers = { 'content-type': 'application/json', [TOKEN]: (await token) ?? '' }
+  const post = (path: string, body: unknown, good: string, signal?: AbortSignal): Promise<Response> => {
+    const headers = { 'content-type': 'application/json', [TOKEN]: good }
     return place.fetch(path, { method: 'POST', headers, body: JSON.stringify(body), signal: signal ?? null })
   }
 
   const ask: Ask = async (name, argument, { signal, onProgress } = {}) => {
     if (signal?.aborted) return refused('cancelled', `${name}: cancelled`)
+    const good = await token
+    if (!good.ok) return good
     try {
-      const response = await post(`/call/${encodeURIComponent(name)}`, argument, signal)
+      const response = await post(`/call/${encodeURIComponent(name)}`, argument, good.value, signal)
       for await (const line of linesOf(response)) {
         if (line.kind === 'answer') return outcomeOf(line)
         onProgress?.(line.done, line.of)
@@ -45,9 +47,9 @@ export const pageDesk = (place: Place): Desk => {
     }
   }
 
-  const stand = async (): Promise<boolean> => {
+  const stand = async (good: string): Promise<boolean> => {
     try {
-      const response = await post('/watch', {}, undefined)
+      const response = await post('/watch', {}, good)
       if (!response.ok) return false
       await response.text()
       return true
@@ -56,8 +58,13 @@ export const pageDesk = (place: Place): Desk => {
     }
   }
   const watch = async (): Promise<void> => {
+    const good = await token
+    if (!good.ok) {
+      ending.resolve(good.error)
+      return
+    }
     for (let failures = 0; failures < 2;) {
-      failures = (await stand()) ? 0 : failures + 1
+      failures = (await stand(good.value)) ? 0 : failures + 1
       await new Promise((resolve) => setTimeout(resolve, PAUSE))
     }
     ending.resolve(unreachable.error)
@@ -72,20 +79,30 @@ const unreachable = refused(
   'The program behind this page was closed or has stopped. What was kept is safe; the last call was perhaps not carried out.',
 )
 
-/** The token of an earlier load of this page, or the one that the key is swapped for; undefined where neither is good. */
-const tokenOf = async ({ fetch, key, memory }: Place): Promise<string | undefined> => {
-  if (key === undefined) return memory.read() ?? undefined
+/** The token that the key is swapped for, or the one of an earlier load of this page; else why there is none. */
+const tokenOf = async ({ fetch, key, memory }: Place): Promise<Outcome<string>> => {
+  const former = memory.read()
+  if (key === undefined) return former === null ? keyless : { ok: true, value: former }
   try {
     const init = { method: 'POST', headers: { 'content-type': 'application/json' }, body: JSON.stringify({ key }) }
     const response = await fetch('/token', init)
-    if (!response.ok) return memory.read() ?? undefined
-    const { token } = (await response.json()) as { token: string }
-    memory.write(token)
-    return token
+    if (response.ok) {
+      const { token } = (await response.json()) as { token: string }
+      memory.write(token)
+      return { ok: true, value: token }
+    }
+    if (former !== null) return { ok: true, value: former }
+    for await (const line of linesOf(response)) if (line.kind === 'answer' && !line.ok) return line
+    return unreachable
   } catch {
-    return undefined
+    return unreachable
   }
 }
+
+const keyless = refused(
+  'no-right',
+  'This address lacks its key: open the whole address that the program printed, or start the program again.',
+)
 
 /** The lines of an answer as they arrive. */
 async function* linesOf(response: Response): AsyncGenerator<PageLine> {

@@ -1,0 +1,48 @@
+/** `npm start`: builds what is stale, then opens the window in Electron, or as a page where Electron cannot run. */
+import { spawn } from 'node:child_process'
+import { join } from 'node:path'
+import { hasDisplay } from './page/open.ts'
+import { electronIn, fetchElectron } from './start/electron.ts'
+import { isStale } from './start/stale.ts'
+
+const PROJECT = join(import.meta.dirname, '..')
+const ELECTRON = join(PROJECT, 'node_modules/electron')
+const FETCH_LIMIT = 5 * 60_000
+
+const say = (line: string) => process.stdout.write(`${line}\n`)
+
+const start = async (given: readonly string[]): Promise<void> => {
+  if (isStale()) {
+    say('Building the window.')
+    await import('./build.ts')
+  }
+  const electron = await wantedElectron(given)
+  const [file, ...before] = electron === undefined ? [process.execPath, 'out/main/page.js'] : [electron, PROJECT]
+  const child = spawn(file, [...before, ...given], { cwd: PROJECT, stdio: 'inherit' })
+  // The terminal sends its signals to both; this one only waits for the other to end.
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => child.kill(signal))
+  child.on('error', (error) => {
+    say(`longtravel: cannot start ${file}: ${error.message}`)
+    process.exitCode = 3
+  })
+  child.on('exit', (code) => {
+    process.exitCode = code ?? 3
+  })
+}
+
+/** Electron's program where it is to be used, fetched if need be; undefined where the page is to be served, with the reason said. */
+const wantedElectron = async (given: readonly string[]): Promise<string | undefined> => {
+  if (process.env['LONGTRAVEL_PAGE'] === '1' || given.includes('--no-open')) return undefined
+  if (!hasDisplay(process.platform, process.env)) {
+    say('There is no display here: the window is served as a page.')
+    return undefined
+  }
+  const there = electronIn(ELECTRON)
+  if (there !== undefined) return there
+  say(`Fetching Electron, once and for at most ${FETCH_LIMIT / 60_000} minutes ...`)
+  const fetched = await fetchElectron(ELECTRON, FETCH_LIMIT)
+  if (fetched === undefined) say('Electron could not be fetched: the window opens in the browser instead.')
+  return fetched
+}
+
+await start(process.argv.slice(2))

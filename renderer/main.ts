@@ -3,6 +3,7 @@ import { mount } from 'svelte'
 import './styles/faces.css'
 import './styles/tokens.css'
 import './styles/base.css'
+import './styles/form.css'
 import App from './App.svelte'
 
 const target = document.querySelector('#window')

@@ -58,13 +58,17 @@ export class Job implements JobState {
     return typed !== undefined && typed.stored === stored ? typed.text : lineOf(stored)
   }
 
+  has(path: string): boolean {
+    return valueAt(this.#tree, path) !== undefined
+  }
+
   enter(path: string, typed: string): void {
     if (typed.trim() === '') {
       this.#tree = withValue(this.#tree, path, undefined)
       return
     }
     const entry = fieldAt(path)?.entry
-    if (entry === undefined) return
+    if (entry === undefined) throw new Error(`The dictionary has no field ${path}`)
     const stored = storedOf(entry, typed, this.units)
     this.#tree = withValue(this.#tree, path, stored)
     // Where a bare number took a unit, what is stored is shown: the figure alone would change its meaning with the units shown.

@@ -3,6 +3,8 @@ import { MediaQuery } from 'svelte/reactivity'
 
 export type Shade = 'light' | 'dark'
 
+export const isShade = (value: unknown): value is Shade => value === 'light' || value === 'dark'
+
 export class Theme {
   readonly #system = new MediaQuery('(prefers-color-scheme: dark)', false)
   #wanted = $state<Shade | undefined>()

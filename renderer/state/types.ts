@@ -13,6 +13,8 @@ export interface JobState {
   readonly units: UnitSystem
   /** Value typed at a path ("cranes[0].ratedCapacity"), or undefined where it was left out. */
   entry(path: string): string | undefined
+  /** Whether anything is entered at a path, be it a value, a list or a part. */
+  has(path: string): boolean
   /** Sets what was typed; '' takes it out again, so that the default holds. */
   enter(path: string, typed: string): void
   readonly cranes: number

@@ -1,0 +1,2 @@
+/** The views that the head names. */
+export type View = 'girder' | 'revisions'

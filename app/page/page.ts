@@ -150,13 +150,15 @@ const FULL = refuse('in-use', 'The window is open in four pages already: close o
 
 /** An error that the window shows. */
 const say = (response: ServerResponse, status: number, error: CallError): void => {
+  response.shouldKeepAlive = false
   beginLines(response, status)
-  response.end(lineOf({ kind: 'answer', ok: false, error }))
+  response.end(lineOf({ kind: 'answer', ok: false, error }), () => response.req.destroy())
 }
 
-/** Ends the connection with the answer: what else it sends is not read. */
+/** Ends the connection with the answer, as `say` does: what else it sends is not read. */
 const turnAway = (response: ServerResponse, { status, message }: Refusal): void => {
-  response.writeHead(status, { ...HEADERS, 'content-type': 'text/plain; charset=utf-8', connection: 'close' })
+  response.shouldKeepAlive = false
+  response.writeHead(status, { ...HEADERS, 'content-type': 'text/plain; charset=utf-8' })
   response.end(`${message}\n`, () => response.req.destroy())
 }
 

@@ -15,8 +15,20 @@ import { HEADERS } from './policy.ts'
 /** The bundle stands in out/main, its neighbours in out/preload and out/renderer. */
 const near = (path: string): string => fileURLToPath(new URL(path, import.meta.url))
 
-/** Starts the program, or hands over to the one that runs already on the same data folder. */
-export const start = async (): Promise<void> => {
+/**
+ * Starts the program, or hands over to the one that runs already on the same data folder. `folder` holds the built window. What
+ * keeps it from starting is shown before it ends.
+ */
+export const start = async (folder = near('../renderer')): Promise<void> => {
+  try {
+    await open(folder)
+  } catch (error) {
+    dialog.showErrorBox('Longtravel', `The window cannot be opened: ${String(error)}`)
+    app.exit(3)
+  }
+}
+
+const open = async (folder: string): Promise<void> => {
   const data = dataFolder(process.env, process.platform)
   if (!('folder' in data)) {
     dialog.showErrorBox('Longtravel', data.message)
@@ -44,7 +56,7 @@ export const start = async (): Promise<void> => {
   closeBeforeQuit(desk)
   Menu.setApplicationMenu(Menu.buildFromTemplate(MENU))
   guardSession(session.defaultSession)
-  serveWindow(near('../renderer'))
+  serveWindow(folder)
   carry(ipcMain, desk)
   await openWindow()
 }

@@ -33,10 +33,12 @@ export const pageDesk = (place: Place): Desk => {
 
   const ask: Ask = async (name, argument, { signal, onProgress } = {}) => {
     if (signal?.aborted) return refused('cancelled', `${name}: cancelled`)
+    // The name stands in the address as it is.
+    if (!/^[\w.]*$/.test(name)) return refused('unknown-call', `${name.slice(0, 40)}: there is no such call`)
     const good = await token
     if (!good.ok) return good
     try {
-      const response = await post(`/call/${encodeURIComponent(name)}`, argument, good.value, signal)
+      const response = await post(`/call/${name}`, argument, good.value, signal)
       for await (const line of linesOf(response)) {
         if (line.kind === 'answer') return outcomeOf(line)
         onProgress?.(line.done, line.of)

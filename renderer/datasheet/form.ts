@@ -23,7 +23,7 @@ export interface FormLine {
   readonly label: string
   readonly field: Field
   readonly control: 'text' | 'note' | 'choice' | 'form' | 'beside'
-  /** What can be chosen: value in the file, word. Of a choice the default stands first, as ''. */
+  /** What can be chosen: value in the file, word. */
   readonly choices: readonly (readonly [value: string, word: string])[]
   /** The part whose form is chosen in this line. */
   readonly part?: string
@@ -39,13 +39,18 @@ export const formOf = (job: Pick<JobState, 'way' | 'entry' | 'has' | 'cranes'>):
     lines: linesBelow('cranes[].', job, crane),
   })),
   { title: 'Runway', lines: linesBelow('runway.', job) },
-  { title: 'Girder', lines: linesBelow('girder.', job) },
+  {
+    title: 'Girder',
+    lines: [...linesBelow('girder.section', job), ...linesBelow('girder.', job).filter(notOfSection)],
+  },
   { title: 'Rules', lines: linesBelow('basis.', job) },
   { title: 'Project', lines: linesBelow('project.', job) },
 ]
 
 /** What a line says where nothing is entered. A default of nothing is shown in the units in use. */
-export const defaultText = (field: Field, units: UnitSystem): string => {
+export const defaultText = ({ field, path }: Pick<FormLine, 'field' | 'path'>, units: UnitSystem): string => {
+  const crane = /^cranes\[(\d+)\]\.name$/.exec(path)?.[1]
+  if (crane !== undefined) return `Crane ${Number(crane) + 1}`
   const taken = field.default
   if (taken === undefined) return ''
   if (taken.text !== undefined) return taken.text
@@ -60,7 +65,8 @@ export const defaultText = (field: Field, units: UnitSystem): string => {
 }
 
 /** What may be entered and what holds if nothing is, as the lines of a note. */
-export const helpOf = ({ field, label }: FormLine, units: UnitSystem): readonly string[] => {
+export const helpOf = (line: FormLine, units: UnitSystem): readonly string[] => {
+  const { field, label } = line
   const { entry, default: taken, source, required } = field
   const shown = bareUnit(entry, units)
   return [
@@ -69,7 +75,7 @@ export const helpOf = ({ field, label }: FormLine, units: UnitSystem): readonly 
     shown === '' ? '' : `A bare number is read in ${shown}.`,
     entry.is === 'list' ? 'Items are parted by commas; “3 × 30 ft” repeats one.' : '',
     required === undefined ? '' : required === true ? 'Required.' : `Required ${required}.`,
-    taken === undefined ? '' : `Left out: ${defaultText(field, units)} (${taken.source}).`,
+    taken === undefined ? '' : `Left out: ${defaultText(line, units)} (${taken.source}).`,
     source === undefined ? '' : `Source: ${source}.`,
   ].filter((part) => part !== '')
 }
@@ -81,6 +87,9 @@ const bareUnit = (entry: Entry, units: UnitSystem): string => {
   if (entry.is !== 'quantity') return ''
   return writeUnit(shownUnit(entry.kind === 'forceOrMass' ? 'force' : entry.kind, units))
 }
+
+/** The make-up is asked first: which steels there are depends on it. */
+const notOfSection = ({ path }: FormLine): boolean => !path.startsWith('girder.section')
 
 type Reads = Pick<JobState, 'way' | 'entry' | 'has'>
 
@@ -143,7 +152,7 @@ const lineOfField = (path: string, field: Field, job: Reads): FormLine => {
   const part = Object.keys(BESIDE).find((each) => BESIDE[each] === path)
   if (part !== undefined) return { ...besides(path, part, field, nameOf(part), job), owed: true }
   const common = { path, label: labelOf(path, field), field, owed }
-  const choices = choicesOf(path, field, job)
+  const choices = choicesOf(field)
   if (choices.length > 0) return { ...common, control: 'choice', choices }
   const control = field.entry.is === 'text' && field.entry.most > 1000 ? 'note' : 'text'
   return { ...common, control, choices, ...(field.entry.is === 'lookUp' ? { family: field.entry.family } : {}) }
@@ -162,19 +171,15 @@ const besides = (path: string, part: string, field: Field, label: string, job: R
 
 const wordsOf = (ways: readonly Way[]): FormLine['choices'] => ways.map(({ word, label }) => [word, label])
 
-const choicesOf = (path: string, field: Field, job: Reads): FormLine['choices'] => {
-  const { entry, notCovered } = field
+const choicesOf = ({ entry, notCovered }: Field): FormLine['choices'] => {
   const refused = typeof notCovered === 'object' && 'values' in notCovered ? notCovered.values : []
-  const fallback = field.default === undefined ? '' : `${defaultText(field, 'us')}, default`
-  const own = job.has(path) && job.entry(path) === undefined ? [[OWN, 'as in the file'] as const] : []
   if (entry.is === 'flag')
     return [
-      ['', fallback],
       ['true', 'yes'],
       ['false', 'no'],
     ]
   const covered = coveredChoices(entry, refused)
-  return covered.length < 2 ? [] : [['', fallback], ...own, ...covered.map((value) => [value, wordOf(value)] as const)]
+  return covered.length < 2 ? [] : covered.map((value) => [value, wordOf(value)] as const)
 }
 
 /** Stands for an entry that the data sheet shows but has no line to write. */

@@ -2,20 +2,22 @@
 import type { Finding } from '../../core/job/read.ts'
 import type { FormGroup, FormLine } from './form.ts'
 
-/** The first finding at a line: of its own path, of an item of its list, or of the part it names. */
-export const findingAt = (findings: ReadonlyMap<string, Finding>, { path, part }: FormLine): Finding | undefined =>
-  findings.get(path) ??
-  (part === undefined ? undefined : findings.get(part)) ??
-  [...findings.values()].find((finding) => finding.path.startsWith(`${path}[`))
+/** The first finding at a line: of its own path, of an item of its list, of the part it names, or of a part that is missing. */
+export const findingAt = (findings: ReadonlyMap<string, Finding>, line: FormLine): Finding | undefined =>
+  [...findings.values()].find((finding) => belongs(finding, line))
 
 /** Findings that no line shows: of fields without a line, of the file as a whole. */
 export const unplaced = (findings: ReadonlyMap<string, Finding>, groups: readonly FormGroup[]): readonly Finding[] => {
   const lines = groups.flatMap((group) => group.lines)
-  const shown = new Set(lines.flatMap(({ path, part }) => (part === undefined ? [path] : [path, part])))
-  return [...findings.values()].filter(
-    ({ path }) => !shown.has(path) && !lines.some((line) => path.startsWith(`${line.path}[`)),
-  )
+  return [...findings.values()].filter((finding) => !lines.some((line) => belongs(finding, line)))
 }
+
+const belongs = (finding: Finding, { path, part, owed }: FormLine): boolean =>
+  finding.path === path ||
+  finding.path === part ||
+  finding.path.startsWith(`${path}[`) ||
+  // Where a whole part is missing, each of its lines is still to be filled in.
+  (owed && isOwed(finding) && path.startsWith(`${finding.path}.`))
 
 /** The message without the field's name, which the line bears already. */
 export const messageOf = ({ message }: Finding, { field }: FormLine): string => {

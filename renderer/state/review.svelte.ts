@@ -56,9 +56,18 @@ export class Review implements ReviewState {
   submit(text: string, units: UnitSystem): void {
     const otherUnits = units !== this.#units
     this.#units = units
-    if (text === this.#asked && !otherUnits) return
+    if (otherUnits) this.#askWorking()
+    if (text === this.#asked) return
     this.#asked = text
     if (this.#running === undefined) this.#ask()
+  }
+
+  /** Another job comes in: figures of the one before must not stand beside its entries. */
+  clear(): void {
+    this.#review = undefined
+    this.#working = undefined
+    this.#chosen = undefined
+    this.#place = 0
   }
 
   choose(id: string, place = 0): void {

@@ -49,6 +49,11 @@ export class Stand implements StandState {
     this.#train = train
   }
 
+  /** Another job comes in: the crane is stood anew. */
+  leave(): void {
+    this.#placed = false
+  }
+
   /** Keeps to what the review has: the first one is stood at its greatest moment, and so is one whose span or train is gone. */
   fit({ envelope, job, trains }: ReviewValues): void {
     const there = this.#placed && this.#span < job.runway.spans.length && this.#train < trains.length

@@ -12,7 +12,10 @@ import { stiffnessOf, type Present } from './standing.ts'
 export type Effect = 'moment' | 'shear' | 'deflection'
 export const EFFECTS: readonly Effect[] = ['moment', 'shear', 'deflection']
 
-export const KIND_OF = { moment: 'moment', shear: 'force', deflection: 'length' } as const satisfies Record<Effect, Kind>
+export const KIND_OF = { moment: 'moment', shear: 'force', deflection: 'length' } as const satisfies Record<
+  Effect,
+  Kind
+>
 
 /** Which way positive values are drawn: sagging moments and deflections hang, as the girder does. */
 export const HANGS: Readonly<Record<Effect, boolean>> = { moment: true, shear: false, deflection: true }

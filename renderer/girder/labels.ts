@@ -1,6 +1,7 @@
 /** What is written at a diagram's lines: the greatest value now, and for shear the envelope's ends, none over another. */
 import { as, type UnitSystem } from '../../core/quantity/kinds.ts'
-import { writeQuantity } from '../../core/quantity/write.ts'
+import { inUnit, shownUnit } from '../../core/quantity/units.ts'
+import { writeNumber, writeQuantity } from '../../core/quantity/write.ts'
 import { textWidth } from '../../core/figure/text.ts'
 import { HANGS, KIND_OF, type Bounds, type Effect, type Peak } from './diagram-data.ts'
 import { stationText } from './standing.ts'
@@ -14,10 +15,15 @@ export interface Label {
   readonly left: number
 }
 
-export const valueText = (effect: Effect, value: number, units: UnitSystem): string => {
+/** A value in the unit shown, with its unit: where no heading tells it. */
+export const quantityText = (effect: Effect, value: number, units: UnitSystem): string => {
   const kind = KIND_OF[effect]
   return writeQuantity({ kind, value: as(kind, value) }, units)
 }
+
+/** The figure alone: the diagram's heading and the table's caption name the unit. */
+export const valueText = (effect: Effect, value: number, units: UnitSystem): string =>
+  writeNumber(inUnit(value, shownUnit(KIND_OF[effect], units)))
 
 /** Pixels that a text takes, at most. */
 const pixelsOf = (text: string, perMillimetre: number): number => textWidth(text) * perMillimetre

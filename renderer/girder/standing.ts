@@ -4,7 +4,7 @@ import { as, type Metre, type NewtonSquareMetre, type UnitSystem } from '../../c
 import { writeFeetInches, writeQuantity } from '../../core/quantity/write.ts'
 import { beamOf, wheelName, wheelsAt, type StandingWheel, type View } from '../../core/figure/standing.ts'
 import { spanOf } from '../../core/travel/influence.ts'
-import { stationsOf } from '../../core/travel/place.ts'
+import { onSpan, stationsOf } from '../../core/travel/place.ts'
 import { standAt } from '../../core/travel/stand-at.ts'
 import { momentAt, type Standing } from '../../core/travel/statics.ts'
 import type { Drive, Extreme } from '../../core/travel/types.ts'
@@ -58,23 +58,34 @@ export const presentOf = (review: ReviewValues, extreme: Extreme): Present => {
  * resultant from midspan against each other.
  */
 export const extremeAt = (review: ReviewValues, stood: Stood): Extreme => {
-  const drive = driveOf(review, stood)
   if (review.trains[stood.train] === undefined) return review.envelope.moment.max
+  const drive = driveOf(review, stood)
   const { start, length } = spanOf(drive.beam, stood.span)
-  const at = standAt(drive, as('distance', stood.lead), stood.mirrored, as('distance', start + length / 2))
-  const { girder } = presentOf(review, at)
+  const middle = as('distance', start + length / 2)
+  return readAtPeak(review, standAt(drive, as('distance', stood.lead), stood.mirrored, middle))
+}
+
+/** The same of an extreme whose cranes stand apart, where they were found. */
+export const extremeApart = (review: ReviewValues, extreme: Extreme): Extreme => {
+  const beam = beamOf(review)
+  const stations: number[] = []
+  for (const { index, station } of wheelsAt(review, extreme)) stations[index] = station
+  return readAtPeak(review, { ...extreme, on: onSpan(beam, extreme.span, stations).map(({ wheel }) => wheel) })
+}
+
+const readAtPeak = (review: ReviewValues, extreme: Extreme): Extreme => {
+  const { start, girder } = presentOf(review, extreme)
   const peak = girder.loads.reduce((best, { x }) => {
     const moment = momentAt(girder, x)
     return moment > best.moment * (1 + 1e-9) ? { x, moment } : best
   }, NONE)
-  if (peak === NONE) return at
-  return standAt(drive, as('distance', stood.lead), stood.mirrored, as('distance', start + peak.x))
+  return peak === NONE ? extreme : { ...extreme, side: 'at', station: as('distance', start + peak.x) }
 }
 
 const NONE = { x: 0, moment: 0 }
 
 /** The span, or with it as much of its neighbours as the train reaches over: fixed, however the train moves. */
-export const viewOf = (review: ReviewValues, stood: Stood, wide: boolean): View => {
+export const viewOf = (review: ReviewValues, stood: Omit<Stood, 'lead'>, wide: boolean): View => {
   const { spans } = review.job.runway
   const { start, length } = spanOf(beamOf(review), stood.span)
   const train = review.trains[stood.train]

@@ -8,23 +8,29 @@ const OPEN = /^<math [^>]*><mrow>/
 const CLOSE = '</mrow></math>'
 
 /**
- * Parts of a whole equation, each a whole `<math>` element, each after the first beginning with the sign it is broken before.
+ * Sides of an equation or a comparison, each after the first beginning with its relation, and each side's pieces, each after the
+ * first beginning with the sign it is broken before. Every piece is a whole `<math>` element.
  * What is not of our own typesetting's form (core/formula/script.ts, `math`) stays in one piece; nothing stays nothing.
  */
-export const piecesOf = (mathml: string): readonly string[] => {
+export const sidesOf = (mathml: string): readonly (readonly string[])[] => {
   const open = OPEN.exec(mathml)?.[0]
-  if (open === undefined || !mathml.endsWith(CLOSE)) return mathml === '' ? [] : [mathml]
+  if (open === undefined || !mathml.endsWith(CLOSE)) return mathml === '' ? [] : [[mathml]]
   const parts = children(mathml.slice(open.length, -CLOSE.length))
-  if (parts === undefined) return [mathml]
-  const pieces: string[][] = [[]]
+  if (parts === undefined) return [[mathml]]
+  const sides: string[][][] = [[[]]]
   for (const part of parts) {
-    const sign = /^<mo>([^<]*)<\/mo>$/.exec(part)?.[1]
-    const breaks = sign !== undefined && (RELATIONS.has(sign) || SIGNS.has(sign))
-    if (breaks && pieces.at(-1)!.length > 0 && !endsInSign(pieces.at(-1)!)) pieces.push([])
+    const sign = /^<mo>([^<]*)<\/mo>$/.exec(part)?.[1] ?? ''
+    const [side, breaks] = [RELATIONS.has(sign), RELATIONS.has(sign) || SIGNS.has(sign)]
+    const before = sides.at(-1)!.at(-1)!
+    if (breaks && before.length > 0 && !endsInSign(before)) {
+      if (side) sides.push([[]])
+      else sides.at(-1)!.push([])
+    }
+    const piece = sides.at(-1)!.at(-1)!
     // At the head of a row a sign would be set as a sign of its own number: "infix" keeps the room about it.
-    pieces.at(-1)!.push(breaks && pieces.at(-1)!.length === 0 ? part.replace('<mo>', '<mo form="infix">') : part)
+    piece.push(breaks && piece.length === 0 ? part.replace('<mo>', '<mo form="infix">') : part)
   }
-  return pieces.map((piece) => `${open}${piece.join('')}${CLOSE}`)
+  return sides.map((side) => side.map((piece) => `${open}${piece.join('')}${CLOSE}`))
 }
 
 /** A sign just before belongs with this one: "= −3". */

@@ -92,7 +92,14 @@ export const packaging: Configuration = {
   asarUnpack: ['node_modules/better-sqlite3/prebuilds/**'],
   npmRebuild: false,
   publish: null,
-  electronFuses: { runAsNode: false, onlyLoadAppFromAsar: true },
+  // The program inside can only be what was packed: no other script, no option from outside, no right over files.
+  electronFuses: {
+    runAsNode: false,
+    enableNodeOptionsEnvironmentVariable: false,
+    enableNodeCliInspectArguments: false,
+    onlyLoadAppFromAsar: true,
+    grantFileProtocolExtraPrivileges: false,
+  },
   linux: { target: ['AppImage', 'deb'], category: 'Engineering', icon: 'resources/icons/longtravel.png' },
   win: { target: ['nsis'], icon: 'resources/icons/longtravel.png' },
   mac: { target: ['dmg'], category: 'public.app-category.developer-tools', icon: 'resources/icons/longtravel.png' },

@@ -10,6 +10,9 @@ import { startPage } from './page.ts'
 const WINDOW = fileURLToPath(new URL('../renderer', import.meta.url))
 
 const run = async (): Promise<void> => {
+  const stopped = new Promise<void>((resolve) => {
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.once(signal, () => resolve())
+  })
   const data = dataFolder(process.env, process.platform)
   if (!('folder' in data)) {
     process.stderr.write(`longtravel: ${data.message}\n`)
@@ -23,9 +26,6 @@ const run = async (): Promise<void> => {
   process.stdout.write(`${page.newAddress()}\n`)
   if (opener !== undefined)
     process.stdout.write('If no window appears, open this address in a browser. It is good once.\n')
-  const stopped = new Promise<void>((resolve) => {
-    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.once(signal, () => resolve())
-  })
   await Promise.race([page.gone, stopped])
   tidy?.()
   await page.close()

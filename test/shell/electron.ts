@@ -132,7 +132,7 @@ export const standIn = ({ first = true }: { readonly first?: boolean } = {}): St
 
   const setter = (name: string) => (handler: Listener) => void (session[name] = handler)
   const sessionModule = {
-    on: setter('will-download'),
+    on: (name: string, listener: Listener) => void (session[name] = listener),
     setPermissionRequestHandler: setter('ask'),
     setPermissionCheckHandler: setter('check'),
     setDevicePermissionHandler: setter('device'),

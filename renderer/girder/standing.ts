@@ -6,7 +6,7 @@ import { beamOf, wheelName, wheelsAt, type StandingWheel, type View } from '../.
 import { spanOf } from '../../core/travel/influence.ts'
 import { onSpan, stationsOf } from '../../core/travel/place.ts'
 import { standAt } from '../../core/travel/stand-at.ts'
-import { momentAt, type Standing } from '../../core/travel/statics.ts'
+import { momentAt, shearAt, type Standing } from '../../core/travel/statics.ts'
 import type { Drive, Extreme } from '../../core/travel/types.ts'
 import { held, limitsOf } from './moving.ts'
 import type { Stood } from './governing.ts'
@@ -79,7 +79,16 @@ const readAtPeak = (review: ReviewValues, extreme: Extreme): Extreme => {
     const moment = momentAt(girder, x)
     return moment > best.moment * (1 + 1e-9) ? { x, moment } : best
   }, NONE)
-  return peak === NONE ? extreme : { ...extreme, side: 'at', station: as('distance', start + peak.x) }
+  if (peak === NONE) return extreme
+  const [station, moment] = [as('distance', start + peak.x), as('moment', peak.moment)]
+  return {
+    ...extreme,
+    value: moment,
+    station,
+    side: 'at',
+    terms: [],
+    with: { moment, shear: as('force', shearAt(girder, peak.x)) },
+  }
 }
 
 const NONE = { x: 0, moment: 0 }

@@ -1,12 +1,14 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
+import { as } from '../../core/quantity/kinds.ts'
 import { beamOf, scaleOf, SIDE } from '../../core/figure/standing.ts'
-import { governingPlaces, standsAt, whatGoverns } from '../../renderer/girder/governing.ts'
+import { cranesApart, governingPlaces, standsAt, whatGoverns } from '../../renderer/girder/governing.ts'
 import { driven, held, limitsOf, snapped, stepOf, stepped } from '../../renderer/girder/moving.ts'
 import { acrossOf, paperOf } from '../../renderer/girder/paper.ts'
 import { railOf, roomFor } from '../../renderer/girder/room.ts'
 import { elevationFigure } from '../../core/figure/elevation.ts'
 import {
+  extremeApart,
   extremeAt,
   leadInSpan,
   leadText,
@@ -57,7 +59,7 @@ describe('moving', () => {
 
   test('the limits leave one wheel on the span; home and end stand the outer wheels over the supports', () => {
     const limits = limitsOf(beam, 0, train, false)
-    expect(limits).toEqual({ from: -reach, to: length, home: 0, end: length - reach })
+    expect(limits).toEqual({ from: 0 - reach, to: length, home: 0, end: length - reach })
     const second = limitsOf(beam, 1, train, false)
     expect(second.home).toBeCloseTo(length, 12)
     const turned = limitsOf(beam, 0, train, true)
@@ -147,6 +149,26 @@ describe('governing positions', () => {
     expect(whatGoverns(places, stoodAt(end))).toMatch(/^stands where shear at the left end( and|,)/)
     expect(whatGoverns(places, stoodAt(end))).toMatch(/ govern$/)
     expect(standsAt({ ...stood, span: 1 }, fifty.envelope.moment.max)).toBe(false)
+  })
+})
+
+describe('cranes that stand apart', () => {
+  const { max } = two.envelope.moment
+  const away = { ...max, positions: max.positions.map((of, i) => ({ ...of, lead: as('distance', of.lead + 8 * i) })) }
+
+  test('are known from those that stand bumper to bumper', () => {
+    expect(cranesApart(two, max)).toBe(false)
+    expect(cranesApart(two, away)).toBe(true)
+  })
+
+  test('stand as they were found, with only those wheels on the span that are there', () => {
+    const shown = extremeApart(two, away)
+    const { wheels, length } = presentOf(two, shown)
+    const second = wheels.filter(({ crane }) => crane === 1)
+    expect(second[0]!.station).toBeCloseTo(max.positions[1]!.lead + 8, 9)
+    expect(wheels.filter(({ on }) => on).every(({ station }) => station <= length)).toBe(true)
+    expect(second.some(({ on }) => !on)).toBe(true)
+    expect(shown.value).toBeLessThan(max.value)
   })
 })
 

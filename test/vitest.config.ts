@@ -3,22 +3,39 @@ import { defineConfig } from 'vitest/config'
 
 const root = new URL('..', import.meta.url).pathname
 const common = { root, testTimeout: 120_000 }
+const ofState = 'test/**/*.svelte.test.ts'
+const ofBrowser = 'test/window/**/*.test.ts'
 
-// The report in .reports/ is what .ci/run counts; the screen keeps the default one. The window's state is compiled as for a
-// page, and only its own tests see the packages as a page does.
+// The report in .reports/ is what .ci/run counts; the screen keeps the default one. Tests of the window's state are compiled as
+// for a page, and only they see the packages as a page does.
 export default defineConfig({
   test: {
     root,
     reporters: ['default', ['json', { outputFile: '.reports/vitest.json' }]],
     coverage: { include: ['core/**', 'app/**', 'renderer/**/*.ts'] },
     projects: [
+      { test: { ...common, name: 'program', include: ['test/**/*.test.ts'], exclude: [ofState, ofBrowser] } },
       {
-        test: { ...common, name: 'program', include: ['test/**/*.test.ts'], exclude: ['test/renderer/**'] },
+        plugins: [svelte({ configFile: false })],
+        resolve: { conditions: ['browser'] },
+        test: {
+          ...common,
+          name: 'state',
+          include: [ofState],
+          environment: './test/renderer/page-environment.ts',
+          server: { deps: { inline: ['svelte'] } },
+        },
       },
       {
-        plugins: [svelte({ configFile: false, compilerOptions: { generate: 'client' } })],
-        resolve: { conditions: ['browser'] },
-        test: { ...common, name: 'window', include: ['test/renderer/**/*.test.ts'] },
+        // One browser with the machine to itself: after the others, one file after the other.
+        test: {
+          ...common,
+          name: 'browser',
+          include: [ofBrowser],
+          globalSetup: 'test/window/set-up.ts',
+          fileParallelism: false,
+          sequence: { groupOrder: 1 },
+        },
       },
     ],
   },

@@ -30,7 +30,7 @@ const PROJECT = join(import.meta.dirname, '../..')
 const require = createRequire(import.meta.url)
 
 /** The archive's own tool, which comes with the packer. */
-const asar = createRequire(require.resolve('app-builder-lib/package.json'))('@electron/asar') as {
+const asar = createRequire(require.resolve('electron-builder'))('@electron/asar') as {
   listPackage: (archive: string, options: object) => string[]
   extractAll: (archive: string, folder: string) => void
 }

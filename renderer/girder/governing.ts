@@ -11,7 +11,7 @@ export interface Governing {
   readonly id: string
   /** On the button. */
   readonly words: string
-  /** What is greatest there, as the end of "stands where ... governs". */
+  /** What is greatest there, in full. */
   readonly effect: string
   readonly extreme: Extreme
   readonly fails: boolean
@@ -59,7 +59,7 @@ export const governingPlaces = (
 }
 
 /** The place of a check that a view has chosen: 0 is the worst, the others follow. */
-export const placeOfCheck = (check: CheckValues, place: number): PlaceValues =>
+const placeOfCheck = (check: CheckValues, place: number): PlaceValues =>
   place === 0 ? check : (check.places[place - 1] ?? check)
 
 const checkPlaces = (
@@ -72,7 +72,7 @@ const checkPlaces = (
     const { at, status } = placeOfCheck(check, isChosen ? chosen.place : 0)
     if (at === undefined) return []
     const name = lower(check.title)
-    return [{ id: check.id, words: name, effect: `“${name}”`, extreme: at, fails: status === 'fails' }]
+    return [{ id: check.id, words: name, effect: name, extreme: at, fails: status === 'fails' }]
   })
 
 const lower = (title: string): string => title.charAt(0).toLowerCase() + title.slice(1)
@@ -115,9 +115,9 @@ export const cranesApart = (review: ReviewValues, { train, lead, mirrored, posit
   })
 }
 
-/** "Stands where moment governs", naming everything that is greatest at this position; empty where nothing is. */
+/** "stands where moment governs", naming all that is greatest at this position as its buttons do; empty where nothing is. */
 export const whatGoverns = (places: readonly Governing[], stood: Stood): string => {
-  const names = places.filter(({ extreme }) => standsAt(stood, extreme)).map(({ effect }) => effect)
+  const names = places.filter(({ extreme }) => standsAt(stood, extreme)).map(({ words }) => words)
   if (names.length === 0) return ''
   const list = names.length === 1 ? names[0]! : `${names.slice(0, -1).join(', ')} and ${names.at(-1)!}`
   return `stands where ${list} ${names.length === 1 ? 'governs' : 'govern'}`

@@ -81,8 +81,8 @@ export default {
     exclude: under ? undefined : { path: '^test/fixtures/imports' },
     enhancedResolveOptions: {
       exportsFields: ['exports'],
-      conditionNames: ['browser', 'import', 'node', 'default', 'types'],
-      extensions: ['.ts', '.mjs', '.js', '.json'],
+      conditionNames: ['svelte', 'browser', 'import', 'node', 'default', 'types'],
+      extensions: ['.ts', '.svelte', '.mjs', '.js', '.json'],
     },
   },
 }

@@ -1,8 +1,8 @@
 /** `npm start`: builds what is stale, then opens the window in Electron, or as a page where Electron cannot run. */
-import { spawn } from 'node:child_process'
 import { join } from 'node:path'
 import { hasDisplay } from './page/open.ts'
 import { electronIn, fetchElectron } from './start/electron.ts'
+import { FAULT, failedAtOnce, run } from './start/run.ts'
 import { isStale } from './start/stale.ts'
 
 const PROJECT = join(import.meta.dirname, '..')
@@ -17,17 +17,16 @@ const start = async (given: readonly string[]): Promise<void> => {
     await import('./build.ts')
   }
   const electron = await wantedElectron(given)
-  const [file, ...before] = electron === undefined ? [process.execPath, 'out/main/page.js'] : [electron, PROJECT]
-  const child = spawn(file, [...before, ...given], { cwd: PROJECT, stdio: 'inherit' })
-  // The terminal sends its signals to both; this one only waits for the other to end.
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => child.kill(signal))
-  child.on('error', (error) => {
-    say(`longtravel: cannot start ${file}: ${error.message}`)
-    process.exitCode = 3
-  })
-  child.on('exit', (code) => {
-    process.exitCode = code ?? 3
-  })
+  if (electron !== undefined) {
+    const end = await run(electron, [PROJECT, ...given], PROJECT)
+    if (!failedAtOnce(end)) {
+      process.exitCode = end.code ?? FAULT
+      return
+    }
+    // Electron is never run without its sandbox.
+    say('Electron ended at once, as it does where its sandbox may not run: the window opens in the browser instead.')
+  }
+  process.exitCode = (await run(process.execPath, ['out/main/page.js', ...given], PROJECT)).code ?? FAULT
 }
 
 /** Electron's program where it is to be used, fetched if need be; undefined where the page is to be served, with the reason said. */

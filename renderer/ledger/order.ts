@@ -6,15 +6,15 @@ import type { Extreme } from '../../core/travel/types.ts'
 import { as, type Quantity } from '../../core/quantity/kinds.ts'
 
 export interface LedgerParts {
-  /** What fails, what is not covered, what holds: worst first among those judged. */
+  /** What fails and what holds, worst first; then what is owed and not covered. */
   readonly open: readonly CheckValues[]
   readonly notApplicable: readonly CheckValues[]
 }
 
 const RANK: Readonly<Record<CheckValues['status'], number>> = {
   fails: 0,
-  'not-covered': 1,
-  holds: 2,
+  holds: 1,
+  'not-covered': 2,
   'not-applicable': 3,
 }
 

@@ -26,7 +26,7 @@ const check = (status: CheckValues['status'], utilisation?: number): CheckValues
 })
 
 describe('the ledger', () => {
-  test('has what fails first, then what is not covered, then what holds, worst first; the rest apart', () => {
+  test('has what fails first, then what holds, worst first, then what is not covered; the rest apart', () => {
     const checks = [
       check('holds', 0.2),
       check('not-applicable'),
@@ -36,7 +36,7 @@ describe('the ledger', () => {
       check('fails', 1.4),
     ]
     const { open, notApplicable } = ledgerOf(checks)
-    expect(open.map(({ id }) => id)).toEqual(['fails 1.4', 'fails 1.01', 'not-covered ', 'holds 0.99', 'holds 0.2'])
+    expect(open.map(({ id }) => id)).toEqual(['fails 1.4', 'fails 1.01', 'holds 0.99', 'holds 0.2', 'not-covered '])
     expect(notApplicable).toHaveLength(1)
     expect(summary(checks)).toBe('2 checks fail, 1 not covered, 2 hold')
   })

@@ -62,12 +62,17 @@ export class Review implements ReviewState {
     if (this.#running === undefined) this.#ask()
   }
 
-  /** Another job comes in: figures of the one before must not stand beside its entries. */
-  clear(): void {
+  /** Another job comes in: figures of the one before must not stand beside its entries, nor may an answer to it come in. */
+  start(text: string, units: UnitSystem): void {
+    this.#running = undefined
+    this.#asked = ''
+    this.#answered = ''
+    this.#refused = false
     this.#review = undefined
     this.#working = undefined
     this.#chosen = undefined
     this.#place = 0
+    this.submit(text, units)
   }
 
   choose(id: string, place = 0): void {

@@ -115,9 +115,32 @@ describe('turns', () => {
     const { reviews, answer } = standIn()
     reviews.submit(cab, 'us')
     answer()
-    reviews.clear()
+    reviews.start(pendant, 'us')
     expect(reviews.review).toBeUndefined()
     expect(reviews.chosen).toBeUndefined()
+    answer()
+    expect(reviews.review?.job.project.number).toBe('BKW-101')
+  })
+
+  test('the same job that comes in again is reviewed again', () => {
+    const { reviews, answer } = standIn()
+    reviews.submit(cab, 'us')
+    answer()
+    reviews.start(cab, 'us')
+    expect(reviews.stale).toBe(true)
+    answer()
+    expect(reviews.review).toBeDefined()
+    expect(reviews.stale).toBe(false)
+  })
+
+  test('what was asked of the job before is not shown for the one that came in', () => {
+    const { reviews, asked, answer } = standIn()
+    reviews.submit(cab, 'us')
+    reviews.start(pendant, 'us')
+    answer(asked[0])
+    expect(reviews.review).toBeUndefined()
+    answer(asked[1])
+    expect(reviews.review?.job.project.number).toBe('BKW-101')
   })
 })
 

@@ -3,7 +3,7 @@ import { expect, it } from 'vitest'
 
 // A range that is not imported would be asked for in vain when it is met, and another glyph drawn in its place.
 it('every range of the typeface of formulas is loaded', () => {
-  const folder = new URL('../../node_modules/@mathjax/mathjax-stix2-font/js/svg/dynamic/', import.meta.url)
+  const folder = new URL('../../node_modules/@mathjax/mathjax-stix2-font/mjs/svg/dynamic/', import.meta.url)
   const ranges = readdirSync(folder).filter((name) => name.endsWith('.js'))
   const source = readFileSync(new URL('../../app/print/glyphs.ts', import.meta.url), 'utf8')
   const imported = [...source.matchAll(/dynamic\/([\w-]+\.js)'/g)].map(([, name]) => name)

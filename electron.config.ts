@@ -6,6 +6,7 @@ import { readFileSync } from 'node:fs'
 import { basename } from 'node:path'
 import type { InlineConfig, Plugin } from 'vite'
 import { FILES as FACES } from './app/print/faces.ts'
+import { licences } from './app/start/licences.ts'
 
 const root = import.meta.dirname
 const shared = { configFile: false, logLevel: 'warn' } satisfies InlineConfig
@@ -27,7 +28,7 @@ const faces: Plugin = {
 const main: InlineConfig = {
   ...shared,
   root,
-  plugins: [faces],
+  plugins: [faces, licences],
   ssr: { noExternal: true, external: ['better-sqlite3', 'electron'] },
   build: {
     ssr: true,
@@ -65,7 +66,7 @@ export const rendererOf = (folder: string, outDir: string): InlineConfig => ({
   ...shared,
   root: folder,
   base: './',
-  plugins: [svelte({ configFile: false, compilerOptions: { runes: true } })],
+  plugins: [svelte({ configFile: false, compilerOptions: { runes: true } }), licences],
   worker: { format: 'es' },
   build: { outDir, emptyOutDir: true, assetsInlineLimit: 0, modulePreload: { polyfill: false } },
 })

@@ -62,7 +62,7 @@ export const carry = (ipc: IpcMain, desk: LastingDesk): void => {
 }
 
 /** The page must be the window's own, and no frame inside it. */
-const requireWindow = ({ senderFrame, sender }: IpcMainEvent | IpcMainInvokeEvent): void => {
-  if (senderFrame === null || senderFrame !== sender.mainFrame || pathOf(senderFrame.url) === undefined)
+const requireWindow = ({ senderFrame }: IpcMainEvent | IpcMainInvokeEvent): void => {
+  if (senderFrame === null || senderFrame.parent !== null || pathOf(senderFrame.url) === undefined)
     throw new Error('only the window of the program is heard')
 }

@@ -94,6 +94,16 @@ test('it holds the program and what cannot be bundled, and nothing else', () => 
   expect(files.filter((path) => /\.(?:ts|map|cpp|c|h|gyp|svelte)$/.test(path))).toEqual([])
 })
 
+test('the licences of all that was bundled go with it', () => {
+  const main = readFileSync(join(unpacked, 'out/main/licences.txt'), 'utf8')
+  const window = readFileSync(join(unpacked, 'out/renderer/licences.txt'), 'utf8')
+  for (const name of ['pdfkit', 'fontkit', '@mathjax/src', 'valibot', 'mathjs'])
+    expect(main, name).toMatch(new RegExp(`^${name} \\d`, 'm'))
+  for (const name of ['svelte', 'chart.js']) expect(window, name).toMatch(new RegExp(`^${name} \\d`, 'm'))
+  expect(main).toContain('THE SOFTWARE IS PROVIDED "AS IS"')
+  expect(files).toContain('/node_modules/better-sqlite3/LICENSE')
+})
+
 test('the binaries lie beside the archive, for every system that it may be unpacked on', () => {
   const prebuilds = join(resources, 'app.asar.unpacked/node_modules/better-sqlite3/prebuilds')
   expect(readdirSync(prebuilds).sort()).toEqual(

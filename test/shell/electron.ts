@@ -94,7 +94,6 @@ export const standIn = ({ first = true }: { readonly first?: boolean } = {}): St
 
   const contents = {
     ...inWindow,
-    mainFrame: { name: 'main' },
     isDestroyed: () => false,
     send: (channel: string, ...given: unknown[]) =>
       void fromShell.emit(channel, ...given.map((one) => structuredClone(one))),
@@ -102,7 +101,7 @@ export const standIn = ({ first = true }: { readonly first?: boolean } = {}): St
   }
   /** A new event for each message, as Electron makes them. */
   const from = () => {
-    const frame = sender.inner ? { url: sender.url } : Object.assign(contents.mainFrame, { url: sender.url })
+    const frame = { url: sender.url, parent: sender.inner ? { url: 'longtravel://window/', parent: null } : null }
     return { sender: contents, senderFrame: sender.none ? null : frame }
   }
   const invoke: StandIn['invoke'] = async (channel, ...given) => {

@@ -14,7 +14,12 @@ const say = (line: string) => process.stdout.write(`${line}\n`)
 const start = async (given: readonly string[]): Promise<void> => {
   if (isStale()) {
     say('Building the window.')
-    await import('./build.ts')
+    // In a process of its own: the builder is large, and this one stays while the window is open.
+    const { code } = await run(process.execPath, ['app/build.ts'], PROJECT)
+    if (code !== 0) {
+      process.exitCode = FAULT
+      return
+    }
   }
   const electron = await wantedElectron(given)
   if (electron !== undefined) {

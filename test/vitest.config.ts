@@ -22,7 +22,7 @@ export default defineConfig({
           ...common,
           name: 'state',
           include: [ofState],
-          environment: './test/renderer/page-environment.ts',
+          environment: `${root}test/renderer/page-environment.ts`,
           server: { deps: { inline: ['svelte'] } },
         },
       },

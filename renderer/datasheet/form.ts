@@ -47,6 +47,9 @@ export const formOf = (job: Pick<JobState, 'way' | 'entry' | 'has' | 'cranes'>):
   { title: 'Project', lines: linesBelow('project.', job) },
 ]
 
+/** The id of a line's entry in the page. */
+export const entryId = (path: string): string => `entry-${path.replace(/\W+/g, '-')}`
+
 /** What a line says where nothing is entered. A default of nothing is shown in the units in use. */
 export const defaultText = ({ field, path }: Pick<FormLine, 'field' | 'path'>, units: UnitSystem): string => {
   const crane = /^cranes\[(\d+)\]\.name$/.exec(path)?.[1]
@@ -144,7 +147,7 @@ const isName = (part: string, name: string): boolean => BESIDE[part] === `${part
 
 const lineOfField = (path: string, field: Field, job: Reads): FormLine => {
   const ways = WAYS[path]
-  const owed = field.required === true
+  const owed = field.required === true || isNeeded(path)
   if (path === 'girder.section.shape')
     return { ...besides(path, path, field, 'Shape', job), family: 'iShape', owed: true }
   if (ways !== undefined)
@@ -168,6 +171,13 @@ const besides = (path: string, part: string, field: Field, label: string, job: R
   part,
   ...(field.entry.is === 'lookUp' ? { family: field.entry.family } : {}),
 })
+
+/** Whether the form that is in use of a part needs this field. */
+const isNeeded = (path: string): boolean => {
+  const cut = path.lastIndexOf('.')
+  const part = fieldList.find(([pattern]) => pattern === path.slice(0, cut))?.[1].entry
+  return part?.is === 'object' && part.ways?.some(({ needs }) => needs.includes(path.slice(cut + 1))) === true
+}
 
 const wordsOf = (ways: readonly Way[]): FormLine['choices'] => ways.map(({ word, label }) => [word, label])
 

@@ -12,12 +12,16 @@ export const unplaced = (findings: ReadonlyMap<string, Finding>, groups: readonl
   return [...findings.values()].filter((finding) => !lines.some((line) => belongs(finding, line)))
 }
 
-const belongs = (finding: Finding, { path, part, owed }: FormLine): boolean =>
-  finding.path === path ||
-  finding.path === part ||
-  finding.path.startsWith(`${path}[`) ||
-  // Where a whole part is missing, each of its lines is still to be filled in.
-  (owed && isOwed(finding) && path.startsWith(`${finding.path}.`))
+const belongs = (finding: Finding, { path, part, owed, control }: FormLine): boolean => {
+  if (control === 'form' && isUnformed(finding)) return false
+  return (
+    finding.path === path ||
+    finding.path === part ||
+    finding.path.startsWith(`${path}[`) ||
+    // Where a whole part is missing, each of its lines is still to be filled in.
+    (owed && isOwed(finding) && path.startsWith(`${finding.path}.`))
+  )
+}
 
 /** The message without the field's name, which the line bears already. */
 export const messageOf = ({ message }: Finding, { field }: FormLine): string => {
@@ -26,4 +30,7 @@ export const messageOf = ({ message }: Finding, { field }: FormLine): string => 
 }
 
 /** An entry that is still to be made: said by the empty line itself. */
-export const isOwed = ({ read }: Finding): boolean => read === 'nothing'
+export const isOwed = (finding: Finding): boolean => finding.read === 'nothing' || isUnformed(finding)
+
+/** A part of which nothing is entered that its form needs. */
+const isUnformed = ({ read }: Finding): boolean => /^an object with \d+ fields$/.test(read)

@@ -145,7 +145,7 @@ export class Job implements JobState {
 export const blankJob = (units: UnitSystem): string => JSON.stringify(blank(units))
 
 /** What the dictionary says of a path of the file; undefined where it has no such field. */
-export const fieldAt = (path: string): Field | undefined => {
+const fieldAt = (path: string): Field | undefined => {
   const pattern = patternOf(path)
   return Object.hasOwn(FIELDS, pattern) ? FIELDS[pattern as keyof typeof FIELDS] : undefined
 }

@@ -56,7 +56,10 @@ export class Review implements ReviewState {
   submit(text: string, units: UnitSystem): void {
     const otherUnits = units !== this.#units
     this.#units = units
-    if (otherUnits) this.#askWorking()
+    if (otherUnits) {
+      this.#working = undefined
+      this.#askWorking()
+    }
     if (text === this.#asked) return
     this.#asked = text
     if (this.#running === undefined) this.#ask()
@@ -78,6 +81,7 @@ export class Review implements ReviewState {
   choose(id: string, place = 0): void {
     this.#chosen = id
     this.#place = place
+    this.#working = undefined
     this.#askWorking()
   }
 
@@ -87,7 +91,6 @@ export class Review implements ReviewState {
   }
 
   #askWorking(): void {
-    this.#working = undefined
     const check = this.#review?.checks.find(({ id }) => id === this.#chosen)
     if (check === undefined) return
     this.#port.post({
@@ -102,7 +105,8 @@ export class Review implements ReviewState {
   #take(answer: FromLive): void {
     if (answer.answer === 'working') {
       const wanted = answer.turn === this.#held && answer.id === this.#chosen && answer.place === this.#place
-      if (wanted) this.#working = answer.lines
+      // Lines that say the same stay as they are: typesetting them again would cost more than the comparison.
+      if (wanted && JSON.stringify(answer.lines) !== JSON.stringify(this.#working)) this.#working = answer.lines
       return
     }
     const running = this.#running
@@ -126,7 +130,11 @@ export class Review implements ReviewState {
     this.#held = turn
     const chosen = review.checks.find(({ id }) => id === this.#chosen)
     if (chosen === undefined) this.#chosen = review.governing ?? review.checks[0]?.id
-    if (chosen === undefined || this.#place > chosen.places.length) this.#place = 0
+    if (chosen === undefined || this.#place > chosen.places.length) {
+      this.#place = 0
+      this.#working = undefined
+    }
+    // Those of the review before stand until the new ones are there.
     this.#askWorking()
   }
 }

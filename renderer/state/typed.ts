@@ -45,7 +45,7 @@ export const lineOf = (json: Json | undefined): string | undefined => {
 }
 
 /** What an empty list is called: the spacings of a single wheel. */
-export const NONE = 'none'
+const NONE = 'none'
 
 /** More items than any list of the dictionary takes; the review names the limit. */
 const MOST_ITEMS = 1000

@@ -39,7 +39,7 @@ export interface ReviewState {
   readonly milliseconds: number | undefined
   readonly stale: boolean
   readonly fault: string | undefined
-  /** Lines of the chosen check's derivation; undefined while they are being made. */
+  /** Lines of the chosen check's derivation, those of the review before until the new ones are made; undefined while there are none. */
   readonly working: readonly Line[] | undefined
   /** Id of the check chosen in the ledger. */
   readonly chosen: string | undefined

@@ -150,6 +150,24 @@ describe('messages', () => {
     expect(unplaced(job.findings, formOf(job))).toEqual([])
   })
 
+  test.each([
+    ['runway.rail', 'own', ['height', 'headWidth', 'footWidth', 'mass']],
+    ['girder.steel', 'own', ['fy', 'fu']],
+    ['girder.capSteel', 'own', ['fy', 'fu']],
+    ['girder.section.cap', 'plate', ['plate.width', 'plate.thickness']],
+  ])('of %s in another form stand at what that form needs', (part, word, needed) => {
+    const job = jobOf()
+    job.turn(part, word)
+    review(job)
+    const owed = linesOf(job).filter(({ path }) => path.startsWith(`${part}.`))
+    const marked = owed.filter((line) => {
+      const finding = findingAt(job.findings, line)
+      return finding !== undefined && isOwed(finding) && line.control !== 'beside'
+    })
+    expect(marked.map(({ path }) => path)).toEqual(needed.map((name) => `${part}.${name}`))
+    expect(unplaced(job.findings, formOf(job))).toEqual([])
+  })
+
   test('of fields without a line are told apart', () => {
     const job = jobOf()
     job.open(sampleText('cab').replace('"units"', '"colour":"red","units"'))

@@ -164,6 +164,24 @@ describe('workings', () => {
     expect(reviews.working?.map(({ text }) => text).join('\n')).toContain('kN')
   })
 
+  test('lines stand until those of the next review are there, and longer where they say the same', () => {
+    const { reviews, asked, answer } = shown()
+    answer()
+    const lines = reviews.working
+    const next = (text: string) => {
+      reviews.submit(text, 'us')
+      answer(asked.findLast(({ ask }) => ask === 'review'))
+    }
+    next(cab.replace('BKW-204', 'BKW-205'))
+    expect(reviews.working).toBe(lines)
+    answer()
+    expect(reviews.working).toBe(lines)
+    next(cab.replace('"50 ton"', '"60 ton"'))
+    expect(reviews.working).toBe(lines)
+    answer()
+    expect(reviews.working).not.toEqual(lines)
+  })
+
   test('lines of a check that is no longer chosen are dropped', () => {
     const { reviews, asked, answer } = shown()
     const first = asked.at(-1)

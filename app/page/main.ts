@@ -10,8 +10,9 @@ import { startPage } from './page.ts'
 const WINDOW = fileURLToPath(new URL('../renderer', import.meta.url))
 
 const run = async (): Promise<void> => {
+  // Heard to the end: a second signal, as from a terminal and from the starter, must not cut the closing short.
   const stopped = new Promise<void>((resolve) => {
-    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.once(signal, () => resolve())
+    for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) process.on(signal, () => resolve())
   })
   const data = dataFolder(process.env, process.platform)
   if (!('folder' in data)) {

@@ -114,10 +114,12 @@ describe('the program as a page', () => {
     expect(await exit).toBe(0)
   })
 
-  test('ends when it is told to', async () => {
+  test('ends when it is told to, and in order when it is told twice', async () => {
     const { child, exit, line } = await started(['--no-open'], {})
     await line()
+    child.kill('SIGINT')
     child.kill('SIGTERM')
+    child.kill('SIGINT')
     expect(await exit).toBe(0)
   })
 

@@ -14,6 +14,7 @@ import { drive } from '../../core/travel/drive.ts'
 import { marchedMoment, type March } from './march.ts'
 import { printSpeed } from './print.ts'
 import { timed, type Row } from './timed.ts'
+import { windowSpeed } from './window.ts'
 
 const rows: Row[] = []
 
@@ -134,10 +135,10 @@ for (const { name, milliseconds, reference, ratio } of rows) {
   const figures = [milliseconds, reference, ratio].map((figure) => figure.toPrecision(3).padStart(10))
   console.log(`${name.padEnd(width)}  ${figures.join('  ')}`)
 }
-const printed = await printSpeed()
+const measured = [...(await printSpeed()), ...(await windowSpeed())]
 console.log()
-for (const { name, value, unit } of printed)
+for (const { name, value, unit } of measured)
   console.log(`${name.padEnd(width)}  ${value.toPrecision(3).padStart(10)} ${unit}`)
 
 const json = process.argv.indexOf('--json')
-if (json > 0) writeFileSync(process.argv[json + 1]!, `${JSON.stringify([...rows, ...printed], null, 2)}\n`)
+if (json > 0) writeFileSync(process.argv[json + 1]!, `${JSON.stringify([...rows, ...measured], null, 2)}\n`)

@@ -1,9 +1,11 @@
 /** The built window on a loopback page, with a desk on a data folder of its own. */
+import { spawnSync } from 'node:child_process'
 import { mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { startDesk } from '../../app/desk/desk.ts'
 import { startPage } from '../../app/page/page.ts'
+import { isStale } from '../../app/start/stale.ts'
 import { lastingDesk } from '../../app/shell/lasting-desk.ts'
 import { STANDING_CAUTIONS } from '../../core/review/cautions.ts'
 
@@ -36,4 +38,11 @@ export const serveWindow = async (built: string): Promise<Served> => {
 export const newFolder = () => {
   const folder = mkdtempSync(join(tmpdir(), 'longtravel-window-'))
   return { folder, remove: () => rmSync(folder, { recursive: true, force: true }) }
+}
+
+/** Builds the window if what stands in out/ is not what would be built now. */
+export const buildIfStale = (): void => {
+  if (!isStale()) return
+  const built = spawnSync(process.execPath, [join(import.meta.dirname, '../../app/build.ts')], { encoding: 'utf8' })
+  if (built.status !== 0) throw new Error(`The window cannot be built:\n${built.stdout}${built.stderr}`)
 }

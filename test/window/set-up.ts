@@ -1,11 +1,8 @@
 /** Before the tests of the window: builds it if what stands in out/ is stale, and starts one browser for all of them. */
-import { spawnSync } from 'node:child_process'
 import { cpSync } from 'node:fs'
-import { join } from 'node:path'
 import type { TestProject } from 'vitest/node'
-import { isStale } from '../../app/start/stale.ts'
 import { startBrowser } from './browser.ts'
-import { BUILT, newFolder } from './serve.ts'
+import { BUILT, buildIfStale, newFolder } from './serve.ts'
 
 declare module 'vitest' {
   interface ProvidedContext {
@@ -33,10 +30,4 @@ export default async function setUp(project: TestProject): Promise<(() => Promis
     await browser.close()
     built.remove()
   }
-}
-
-const buildIfStale = (): void => {
-  if (!isStale()) return
-  const built = spawnSync(process.execPath, [join(import.meta.dirname, '../../app/build.ts')], { encoding: 'utf8' })
-  if (built.status !== 0) throw new Error(`The window cannot be built:\n${built.stdout}${built.stderr}`)
 }

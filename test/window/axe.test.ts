@@ -21,7 +21,7 @@ for (const dark of [false, true])
       for (const name of ['Cautions', 'Keep revision', 'Issue calc sheet']) {
         await button(page, name).first().click()
         await page.getByRole('dialog').waitFor()
-        expect(await barriers(page), name).toEqual([])
+        expect(await barriers(page, 'dialog'), name).toEqual([])
         await page.keyboard.press('Escape')
         await page.getByRole('dialog').waitFor({ state: 'detached' })
       }

@@ -47,7 +47,7 @@ inWindow('a wrong entry is kept with its message, and the last figures stand unt
   expect(await entryAt(page, CAPACITY).getAttribute('aria-invalid')).toBe('true')
   const described = (await entryAt(page, CAPACITY).getAttribute('aria-describedby')) ?? ''
   expect(described.split(' ')).toContain(await messageAt(page, CAPACITY).getAttribute('id'))
-  await page.locator('ul.stale').waitFor()
+  await page.locator('section.ledger').getByText('of the entries before').waitFor()
   expect(await page.locator('[data-check]').count()).toBe(before.size)
   await enter(page, CAPACITY, '50 ton')
   await messageAt(page, CAPACITY).waitFor({ state: 'detached' })

@@ -99,7 +99,7 @@ inWindow(
 
 const startOf = (value: string): RegExp => new RegExp(`^\\u2212?${value.replaceAll('.', '\\.')} at `)
 
-inWindow('of two cranes the train is chosen, and turned about where it may be', async ({ page }) => {
+inWindow('of two cranes the train that stands on the rail is chosen', async ({ page }) => {
   await openFile(page, 'two.json', sampleText('two-crane-plate-girder'))
   await expectComputed(page)
   const review = reviewOf(sampleText('two-crane-plate-girder'))

@@ -33,6 +33,10 @@ withBrowser('it starts with a sample computed, and first its cautions', async (o
     await dialog.waitFor({ state: 'detached' })
     await set
 
+    // The shade of the window is remembered with it.
+    const darkened = page.waitForResponse((response) => response.url().endsWith('settings.set'))
+    await button(page, 'Dark').click()
+    await darkened
     const answered = page.waitForResponse((response) => isAbout(response.request(), 'settings.get'))
     await page.reload()
     await answered
@@ -40,6 +44,7 @@ withBrowser('it starts with a sample computed, and first its cautions', async (o
     await page.waitForTimeout(250)
     await expectComputed(page)
     expect(await dialog.count()).toBe(0)
+    expect(await page.locator('html').getAttribute('data-theme')).toBe('dark')
     await button(page, 'Cautions').click()
     expect(await dialog.locator('ol li').allInnerTexts()).toEqual(STANDING_CAUTIONS)
     await page.keyboard.press('Escape')

@@ -143,9 +143,11 @@ export const openFile = async (page: Page, name: string, content: string | Buffe
   await chooser.setFiles({ name, mimeType: 'application/json', buffer: Buffer.from(content) })
 }
 
-/** What axe finds against the levels A and AA, each as one line. */
-export const barriers = async (page: Page): Promise<readonly string[]> => {
+/** What axe finds against the levels A and AA, each as one line, in a part of the window: what lies behind a dialog is inert. */
+export const barriers = async (page: Page, part = 'body'): Promise<readonly string[]> => {
   const { violations } = await new AxeBuilder({ page })
+    .include(part)
+    .options({ resultTypes: ['violations'] })
     .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
     .analyze()
   return violations.flatMap(({ id, nodes }) =>

@@ -92,9 +92,9 @@ function superscript(text: string): string {
 
 const SUPERSCRIPT = '⁰¹²³⁴⁵⁶⁷⁸⁹'
 
-/** A utilisation with three decimals; one over the limit is never rounded down to it, one within it never up to more. */
-export const writeUtilisation = (value: number): string => {
+/** A utilisation, three decimals unless asked otherwise; one over the limit is never rounded back to it. */
+export const writeUtilisation = (value: number, decimals = 3): string => {
   if (value >= 100) return writeNumber(value)
-  const rounded = value > 1 ? Math.ceil(value * 1000) / 1000 : Math.min(Math.round(value * 1000) / 1000, 1)
-  return rounded.toFixed(3)
+  const text = value.toFixed(decimals)
+  return value > 1 && Number(text) === 1 ? (1 + 10 ** -decimals).toFixed(decimals) : text
 }

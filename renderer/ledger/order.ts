@@ -1,6 +1,6 @@
 /** The ledger: which check stands where, and what is said of each. */
 import type { UnitSystem } from '../../core/quantity/kinds.ts'
-import { writeFeetInches, writeNumber, writeQuantity } from '../../core/quantity/write.ts'
+import { writeFeetInches, writeQuantity, writeUtilisation } from '../../core/quantity/write.ts'
 import type { CheckValues, PlaceValues, ReviewValues } from '../../core/review/values.ts'
 import type { Extreme } from '../../core/travel/types.ts'
 import { as, type Quantity } from '../../core/quantity/kinds.ts'
@@ -44,12 +44,9 @@ export const comparison = ({ demand, resistance }: PlaceValues, units: UnitSyste
     : `${left} of ${right}`
 }
 
-/** To hundredths, upward where it fails: what fails never reads as 1.00, and what holds never above it. */
-export const utilisationText = ({ utilisation, status }: PlaceValues): string => {
-  if (utilisation === undefined) return ''
-  if (utilisation >= 100) return writeNumber(utilisation)
-  return (status === 'fails' ? Math.ceil(utilisation * 100 - 1e-9) / 100 : utilisation).toFixed(2)
-}
+/** To hundredths; what fails never reads as 1.00. Empty where nothing was judged. */
+export const utilisationText = ({ utilisation }: PlaceValues): string =>
+  utilisation === undefined ? '' : writeUtilisation(utilisation, 2)
 
 /** Where the limit stands on a rule of length 1, and how far a utilisation reaches: more than the rule holds ends at its edge. */
 export const LIMIT = 0.78

@@ -15,7 +15,8 @@ describe('writeUtilisation', () => {
     [0.9999, '1.000'],
     [1, '1.000'],
     [1.00001, '1.001'],
-    [1.1903, '1.191'],
+    [1.1903, '1.190'],
+    [1.1906, '1.191'],
     [250.04, '250.0'],
   ])('%s is written %s', (value, text) => {
     expect(writeUtilisation(value)).toBe(text)

@@ -104,7 +104,7 @@ describe('the ledger', () => {
       ),
     ).toBe('Wherever the cranes stand.')
     expect(placeWords(crippling, true)).toBe(
-      'span 1 · 1.2D + 1.6L · Crane 1, 40 ton in full, Crane 2, 25 ton vertical · fails, 1.20',
+      'span 1 · 1.2D + 1.6L · Crane 1, 40 ton in full, Crane 2, 25 ton vertical · fails, 1.19',
     )
   })
 })

@@ -24,7 +24,9 @@ export const startBrowser = async (): Promise<BrowserServer | { readonly why: st
     return await chromium.launchServer({ executablePath: named ?? (await unpacked()), args: ARGS, host: '127.0.0.1' })
   } catch (error) {
     const [line] = String(error).split('\n', 1)
-    return { why: `the browser${named === undefined ? ' of the package' : ` ${named}`} does not start: ${line!}` }
+    return {
+      why: `the browser${named === undefined ? ' of the package' : ` ${named}`} does not start: ${line!.replace(/\.+$/, '')}`,
+    }
   }
 }
 

@@ -35,9 +35,10 @@ const takeAll = async (page: Page, name: string): Promise<void> => {
   await take('si')
   await button(page, 'US').click()
 
+  await enter(page, 'girder.section.shape', 'W36X1820')
+  await take('wrong-shape')
   await enter(page, 'cranes[0].ratedCapacity', 'fifty tons')
   await enter(page, 'cranes[0].bridgeSpan', '')
-  await enter(page, 'girder.section.shape', 'W36X1820')
   await take('wrong')
 
   await openFile(page, 'two.json', sampleText('two-crane-plate-girder'))

@@ -27,13 +27,13 @@ export default defineConfig({
         },
       },
       {
-        // One browser with the machine to itself: after the others, one file after the other.
+        // One browser for all files, after the other projects: at most two files at a time, whatever the machine has.
         test: {
           ...common,
           name: 'browser',
           include: [ofBrowser],
           globalSetup: 'test/window/set-up.ts',
-          fileParallelism: false,
+          maxWorkers: 2,
           sequence: { groupOrder: 1 },
         },
       },

@@ -18,7 +18,7 @@ export const stateText = (
   if (fault !== undefined) return { text: `A fault of the program: ${fault}`, grave: true }
   if (findings > 0)
     return {
-      text: `${findings} ${findings === 1 ? 'entry' : 'entries'} to mend${review ? '; figures are of the job before' : ''}`,
+      text: `${findings} ${findings === 1 ? 'entry' : 'entries'} to mend${review ? '; figures are of the entries before' : ''}`,
       grave: true,
     }
   if (review === undefined) return { text: 'being computed', grave: false }

@@ -5,6 +5,8 @@ const root = new URL('..', import.meta.url).pathname
 const common = { root, testTimeout: 120_000 }
 const ofState = 'test/**/*.svelte.test.ts'
 const ofBrowser = 'test/window/**/*.test.ts'
+// Pictures to look at are taken only when asked for.
+const pictures = process.env['LONGTRAVEL_SHOTS'] === '1' ? ['test/window/shots.ts'] : []
 
 // The report in .reports/ is what .ci/run counts; the screen keeps the default one. Tests of the window's state are compiled as
 // for a page, and only they see the packages as a page does.
@@ -31,7 +33,7 @@ export default defineConfig({
         test: {
           ...common,
           name: 'browser',
-          include: [ofBrowser],
+          include: [ofBrowser, ...pictures],
           globalSetup: 'test/window/set-up.ts',
           maxWorkers: 2,
           sequence: { groupOrder: 1 },

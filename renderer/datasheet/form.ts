@@ -74,13 +74,19 @@ export const helpOf = (line: FormLine, units: UnitSystem): readonly string[] => 
   const shown = bareUnit(entry, units)
   return [
     `${label}. ${field.meaning}`,
-    entry.is === 'object' || entry.is === 'choice' || entry.is === 'flag' ? '' : `Right is ${inWords(entry)}.`,
+    entry.is === 'object' || entry.is === 'choice' || entry.is === 'flag' ? '' : `Right is ${inWords(typed(entry))}.`,
     shown === '' ? '' : `A bare number is read in ${shown}.`,
     entry.is === 'list' ? 'Items are parted by commas; “3 × 30 ft” repeats one.' : '',
     required === undefined ? '' : required === true ? 'Required.' : `Required ${required}.`,
     taken === undefined ? '' : `Left out: ${defaultText(line, units)} (${taken.source}).`,
     source === undefined ? '' : `Source: ${source}.`,
   ].filter((part) => part !== '')
+}
+
+/** What can be typed on one line: an object of a job file has lines of its own. */
+const typed = (entry: Entry): Entry => {
+  const lines = entry.is === 'either' ? entry.of.filter(({ is }) => is !== 'object') : []
+  return lines.length === 1 ? lines[0]! : lines.length > 1 ? { is: 'either', of: lines } : entry
 }
 
 /** The unit that a bare number takes. */

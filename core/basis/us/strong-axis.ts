@@ -137,7 +137,7 @@ export function strongAxisCautions({ design, L_b, length, strength }: StrongAxis
   ) as [string, string]
   return [
     rail
-      ? `The J term is dropped for wheels on the unbraced top flange (AISC 360-22 commentary F1): available strong-axis strength at C_b = 1 ${used}; with load at the shear centre ${instead}.`
-      : `Chapter F takes loads at the centroid, while wheels load the unbraced top flange: available strong-axis strength at C_b = 1 ${used}; with the J term dropped (AISC 360-22 commentary F1, basis.loadHeight "rail") ${instead}.`,
+      ? `The J term is dropped for wheels on the unbraced top flange (AISC 360-22 commentary F1): at C_b = 1 the available strong-axis strength is ${used}; with load at the shear centre it would be ${instead}.`
+      : `Chapter F takes loads at the centroid, while wheels load the unbraced top flange: at C_b = 1 the available strong-axis strength is ${used}; with the J term dropped (AISC 360-22 commentary F1; load height at the rail) it would be ${instead}.`,
   ]
 }

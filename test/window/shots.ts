@@ -1,4 +1,4 @@
-/** Pictures of the window to look at, in .reports/window/; only with LONGTRAVEL_SHOTS=1, and nothing is asserted of them. */
+/** Pictures of the window to look at, in .reports/window/; run only where LONGTRAVEL_SHOTS=1, and nothing is asserted of them. */
 import { mkdirSync } from 'node:fs'
 import { join } from 'node:path'
 import type { Page } from 'playwright-core'
@@ -14,7 +14,7 @@ const SIZES = [
   { width: 2560, height: 1440, scale: 2 },
 ]
 
-describe.skipIf(process.env['LONGTRAVEL_SHOTS'] !== '1')('pictures', () => {
+describe('pictures', () => {
   const { inWindow } = windowTests()
   for (const size of SIZES)
     for (const dark of [false, true]) {

@@ -2,7 +2,7 @@
 import { as } from '../quantity/kinds.ts'
 import type { WheelTrain } from '../crane/types.ts'
 import { greatestDeflection } from './deflection.ts'
-import { deflectionLine, ordinateAt, spanOf, withinSpan, type Influence } from './influence.ts'
+import { deflectionLine, ordinateAt, spanOf, withinSpan } from './influence.ts'
 import { driveMoments } from './moments.ts'
 import { inOrder, onSpan, placed, stationsOf, waysOf, worse, type Way } from './place.ts'
 import { driveBracket, driveEnd, driveShear } from './reactions.ts'

@@ -2,7 +2,8 @@ import { svelte } from '@sveltejs/vite-plugin-svelte'
 import { defineConfig } from 'vitest/config'
 
 const root = new URL('..', import.meta.url).pathname
-const common = { root, testTimeout: 120_000 }
+// Left to itself a machine of two cores would be given one worker.
+const common = { root, testTimeout: 120_000, maxWorkers: '100%' }
 const ofState = 'test/**/*.svelte.test.ts'
 const ofBrowser = 'test/window/**/*.test.ts'
 // Pictures to look at are taken only when asked for.

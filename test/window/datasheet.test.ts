@@ -64,7 +64,7 @@ inWindow('an entry that is emptied gives its default back, and Escape what stood
   await gear.press('Escape')
   expect(await gear.inputValue()).toBe('')
   await enter(page, CAPACITY, '')
-  expect(await entryAt(page, CAPACITY).getAttribute('placeholder')).toBe('required')
+  await expect.poll(() => entryAt(page, CAPACITY).getAttribute('placeholder')).toBe('required')
 })
 
 inWindow('a crane is added and removed', async ({ page }) => {
@@ -85,8 +85,8 @@ inWindow('another shape and another make-up of the girder', async ({ page }) => 
   const weaker = await ledgerOf(page)
   expect(Number(weaker.get('Strong-axis bending'))).toBeGreaterThan(Number(before.get('Strong-axis bending')))
   await entryAt(page, 'girder.section').selectOption({ label: 'welded plates' })
-  await entryAt(page, 'girder.section.web.depth').waitFor()
-  expect(await entryAt(page, 'girder.section.web.depth').getAttribute('placeholder')).toBe('required')
+  const depth = entryAt(page, 'girder.section.web.depth')
+  await expect.poll(() => depth.getAttribute('placeholder')).toBe('required')
   await entryAt(page, 'girder.section').selectOption({ label: 'rolled' })
   expect(await valueAt(page, 'girder.section.shape')).toBe('W36X135')
   expect(await ledgerOf(page)).toEqual(weaker)

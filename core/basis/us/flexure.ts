@@ -8,6 +8,24 @@ import type { Basis } from '../../job/types.ts'
 import { as, type Metre, type Metre4, type NewtonMetre, type Pascal } from '../../quantity/kinds.ts'
 import type { Section } from '../../section/types.ts'
 import { available } from './available.ts'
+import { F2_1, F2_4, F2_5, F2_6, F2_LTB, F3_FLB } from './equations-f2-f3.ts'
+import {
+  F4_MP,
+  F4_4,
+  F4_MYT,
+  MY,
+  FLANGE_SHARE,
+  F4_RPC,
+  F4_RPT,
+  F4_1,
+  F4_5,
+  F4_FL,
+  F4_7,
+  F4_8,
+  F4_LTB,
+  F4_FLB,
+  F4_15,
+} from './equations-f4.ts'
 import {
   BUILT_UP_FLANGE_NONCOMPACT,
   FLANGE_COMPACT,
@@ -22,8 +40,6 @@ import {
 } from './slenderness.ts'
 
 const F1 = chapter('AISC 360-22', 'F1')
-const F2 = chapter('AISC 360-22', 'F2')
-const F3 = chapter('AISC 360-22', 'F3')
 const F4 = chapter('AISC 360-22', 'F4')
 
 /** phi_b M_n or M_n / Omega_b of chapter F. */
@@ -35,269 +51,6 @@ export const availableFlexure = available(F1, 'F1(a)', {
   Omega: 1.67,
 })
 
-// ---- F2, doubly symmetric, compact
-const F2_1 = F2.formula('F2-1', { gives: ['M_p', 'moment'], where: { F_y: 'stress', Z_x: 'modulus' }, text: 'F_y*Z_x' })
-const F2_2 = F2.formula('F2-2', {
-  gives: ['M_n', 'moment'],
-  where: {
-    C_b: 'ratio',
-    M_p: 'moment',
-    F_y: 'stress',
-    S_x: 'modulus',
-    L_b: 'distance',
-    L_p: 'distance',
-    L_r: 'distance',
-  },
-  text: 'C_b*(M_p - (M_p - 0.7*F_y*S_x)*((L_b - L_p)/(L_r - L_p)))',
-  atMost: 'M_p',
-})
-const F2_3 = F2.formula('F2-3', {
-  gives: ['M_n', 'moment'],
-  where: { F_cr: 'stress', S_x: 'modulus', M_p: 'moment' },
-  text: 'F_cr*S_x',
-  atMost: 'M_p',
-})
-const F2_4 = F2.formula('F2-4', {
-  gives: ['F_cr', 'stress'],
-  where: {
-    C_b: 'ratio',
-    E: 'stress',
-    L_b: 'distance',
-    r_ts: 'length',
-    J: 'inertia',
-    c: 'ratio',
-    S_x: 'modulus',
-    h_o: 'length',
-  },
-  text: 'C_b*pi^2*E/(L_b/r_ts)^2*sqrt(1 + 0.078*J*c/(S_x*h_o)*(L_b/r_ts)^2)',
-})
-const F2_5 = F2.formula('F2-5', {
-  gives: ['L_p', 'distance'],
-  where: { r_y: 'length', E: 'stress', F_y: 'stress' },
-  text: '1.76*r_y*sqrt(E/F_y)',
-})
-const F2_6 = F2.formula('F2-6', {
-  gives: ['L_r', 'distance'],
-  where: {
-    r_ts: 'length',
-    E: 'stress',
-    F_y: 'stress',
-    J: 'inertia',
-    c: 'ratio',
-    S_x: 'modulus',
-    h_o: 'length',
-  },
-  text: '1.95*r_ts*E/(0.7*F_y)*sqrt(J*c/(S_x*h_o) + sqrt((J*c/(S_x*h_o))^2 + 6.76*(0.7*F_y/E)^2))',
-})
-const NO_BUCKLING_F2 = F2.formula('F2.2(a)', { gives: ['M_n', 'moment'], where: { M_p: 'moment' }, text: 'M_p' })
-const F2_LTB = F2.cases('F2.2', [
-  { clause: '(a)', when: 'L_b <= L_p', use: NO_BUCKLING_F2 },
-  { clause: '(b)', when: 'L_b <= L_r', use: F2_2 },
-  { clause: '(c)', otherwise: F2_3 },
-])
-
-// ---- F3, noncompact or slender flanges
-const F3_1 = F3.formula('F3-1', {
-  gives: ['M_n', 'moment'],
-  where: {
-    M_p: 'moment',
-    F_y: 'stress',
-    S_x: 'modulus',
-    lambda: 'ratio',
-    lambda_pf: 'ratio',
-    lambda_rf: 'ratio',
-  },
-  text: 'M_p - (M_p - 0.7*F_y*S_x)*((lambda - lambda_pf)/(lambda_rf - lambda_pf))',
-})
-const F3_2 = F3.formula('F3-2', {
-  gives: ['M_n', 'moment'],
-  where: { E: 'stress', k_c: 'ratio', S_x: 'modulus', lambda: 'ratio' },
-  text: '0.9*E*k_c*S_x/lambda^2',
-})
-const F3_FLB = F3.cases('F3.2', [
-  { clause: '(a)', when: 'lambda <= lambda_rf', use: F3_1 },
-  { clause: '(b)', otherwise: F3_2 },
-])
-
-// ---- F4, other I shapes with compact or noncompact webs
-const F4_MP = F4.formula('F4.2(c)(6)', {
-  gives: ['M_p', 'moment'],
-  where: { F_y: 'stress', Z_x: 'modulus', S_xc: 'modulus' },
-  text: 'F_y*Z_x',
-  atMost: '1.6*F_y*S_xc',
-})
-const F4_4 = F4.formula('F4-4', {
-  gives: ['M_yc', 'moment'],
-  where: { F_y: 'stress', S_xc: 'modulus' },
-  text: 'F_y*S_xc',
-})
-const F4_MYT = F4.formula('F4.4(b)', {
-  gives: ['M_yt', 'moment'],
-  where: { F_y: 'stress', S_xt: 'modulus' },
-  text: 'F_y*S_xt',
-})
-const MY = F4.formula('Table B4.1b note c', {
-  gives: ['M_y', 'moment'],
-  where: { F_y: 'stress', S_xc: 'modulus', S_xt: 'modulus' },
-  text: 'F_y*min(S_xc, S_xt)',
-})
-const FLANGE_SHARE = F4.formula('F4.2(c)', {
-  gives: ['i', 'ratio'],
-  where: { I_yc: 'inertia', I_y: 'inertia' },
-  text: 'I_yc/I_y',
-})
-const F4_9A = F4.formula('F4-9a', {
-  gives: ['R_pc', 'ratio'],
-  where: { M_p: 'moment', M_yc: 'moment' },
-  text: 'M_p/M_yc',
-})
-const F4_9B = F4.formula('F4-9b', {
-  gives: ['R_pc', 'ratio'],
-  where: {
-    M_p: 'moment',
-    M_yc: 'moment',
-    lambda_w: 'ratio',
-    lambda_pw: 'ratio',
-    lambda_rw: 'ratio',
-  },
-  text: 'M_p/M_yc - (M_p/M_yc - 1)*((lambda_w - lambda_pw)/(lambda_rw - lambda_pw))',
-  atMost: 'M_p/M_yc',
-})
-const ONE_PC = F4.formula('F4-10', { gives: ['R_pc', 'ratio'], where: {}, text: '1.0' })
-const F4_RPC = F4.cases(
-  'F4.2(c)(6)',
-  [
-    { clause: '(ii)', when: 'i <= 0.23', use: ONE_PC },
-    { clause: '(i)(a)', when: 'lambda_w <= lambda_pw', use: F4_9A },
-    { clause: '(i)(b)', otherwise: F4_9B },
-  ],
-  { i: 'ratio' },
-)
-const F4_16A = F4.formula('F4-16a', {
-  gives: ['R_pt', 'ratio'],
-  where: { M_p: 'moment', M_yt: 'moment' },
-  text: 'M_p/M_yt',
-})
-// lambda_w is h_c/t_w here as in F4-9b, so that R_pt is continuous at lambda_pw.
-const F4_16B = F4.formula('F4-16b', {
-  gives: ['R_pt', 'ratio'],
-  where: {
-    M_p: 'moment',
-    M_yt: 'moment',
-    lambda_w: 'ratio',
-    lambda_pw: 'ratio',
-    lambda_rw: 'ratio',
-  },
-  text: 'M_p/M_yt - (M_p/M_yt - 1)*((lambda_w - lambda_pw)/(lambda_rw - lambda_pw))',
-  atMost: 'M_p/M_yt',
-})
-const ONE_PT = F4.formula('F4-17', { gives: ['R_pt', 'ratio'], where: {}, text: '1.0' })
-const F4_RPT = F4.cases(
-  'F4.4(b)',
-  [
-    { clause: '(2)', when: 'i <= 0.23', use: ONE_PT },
-    { clause: '(1)(i)', when: 'lambda_w <= lambda_pw', use: F4_16A },
-    { clause: '(1)(ii)', otherwise: F4_16B },
-  ],
-  { i: 'ratio' },
-)
-const F4_1 = F4.formula('F4-1', {
-  gives: ['M_n', 'moment'],
-  where: { R_pc: 'ratio', M_yc: 'moment' },
-  text: 'R_pc*M_yc',
-})
-const F4_2 = F4.formula('F4-2', {
-  gives: ['M_n', 'moment'],
-  where: {
-    C_b: 'ratio',
-    R_pc: 'ratio',
-    M_yc: 'moment',
-    F_L: 'stress',
-    S_xc: 'modulus',
-    L_b: 'distance',
-    L_p: 'distance',
-    L_r: 'distance',
-  },
-  text: 'C_b*(R_pc*M_yc - (R_pc*M_yc - F_L*S_xc)*((L_b - L_p)/(L_r - L_p)))',
-  atMost: 'R_pc*M_yc',
-})
-const F4_3 = F4.formula('F4-3', {
-  gives: ['M_n', 'moment'],
-  where: { F_cr: 'stress', S_xc: 'modulus', R_pc: 'ratio', M_yc: 'moment' },
-  text: 'F_cr*S_xc',
-  atMost: 'R_pc*M_yc',
-})
-const F4_5 = F4.formula('F4-5', {
-  gives: ['F_cr', 'stress'],
-  where: {
-    C_b: 'ratio',
-    E: 'stress',
-    L_b: 'distance',
-    r_t: 'length',
-    J: 'inertia',
-    S_xc: 'modulus',
-    h_o: 'length',
-  },
-  text: 'C_b*pi^2*E/(L_b/r_t)^2*sqrt(1 + 0.078*J/(S_xc*h_o)*(L_b/r_t)^2)',
-})
-const F4_6A = F4.formula('F4-6a', { gives: ['F_L', 'stress'], where: { F_y: 'stress' }, text: '0.7*F_y' })
-const F4_6B = F4.formula('F4-6b', {
-  gives: ['F_L', 'stress'],
-  where: { F_y: 'stress', S_xt: 'modulus', S_xc: 'modulus' },
-  text: 'F_y*S_xt/S_xc',
-  atLeast: '0.5*F_y',
-})
-const F4_FL = F4.cases('F4.2(c)(3)', [
-  { clause: '(i)', when: 'S_xt/S_xc >= 0.7', use: F4_6A },
-  { clause: '(ii)', otherwise: F4_6B },
-])
-const F4_7 = F4.formula('F4-7', {
-  gives: ['L_p', 'distance'],
-  where: { r_t: 'length', E: 'stress', F_y: 'stress' },
-  text: '1.1*r_t*sqrt(E/F_y)',
-})
-const F4_8 = F4.formula('F4-8', {
-  gives: ['L_r', 'distance'],
-  where: { r_t: 'length', E: 'stress', F_L: 'stress', J: 'inertia', S_xc: 'modulus', h_o: 'length' },
-  text: '1.95*r_t*E/F_L*sqrt(J/(S_xc*h_o) + sqrt((J/(S_xc*h_o))^2 + 6.76*(F_L/E)^2))',
-})
-const NO_BUCKLING_F4 = F4.formula('F4.2(a)', {
-  gives: ['M_n', 'moment'],
-  where: { R_pc: 'ratio', M_yc: 'moment' },
-  text: 'R_pc*M_yc',
-})
-const F4_LTB = F4.cases('F4.2', [
-  { clause: '(a)', when: 'L_b <= L_p', use: NO_BUCKLING_F4 },
-  { clause: '(b)', when: 'L_b <= L_r', use: F4_2 },
-  { clause: '(c)', otherwise: F4_3 },
-])
-const F4_13 = F4.formula('F4-13', {
-  gives: ['M_n', 'moment'],
-  where: {
-    R_pc: 'ratio',
-    M_yc: 'moment',
-    F_L: 'stress',
-    S_xc: 'modulus',
-    lambda: 'ratio',
-    lambda_pf: 'ratio',
-    lambda_rf: 'ratio',
-  },
-  text: 'R_pc*M_yc - (R_pc*M_yc - F_L*S_xc)*((lambda - lambda_pf)/(lambda_rf - lambda_pf))',
-})
-const F4_14 = F4.formula('F4-14', {
-  gives: ['M_n', 'moment'],
-  where: { E: 'stress', k_c: 'ratio', S_xc: 'modulus', lambda: 'ratio' },
-  text: '0.9*E*k_c*S_xc/lambda^2',
-})
-const F4_FLB = F4.cases('F4.3', [
-  { clause: '(b)', when: 'lambda <= lambda_rf', use: F4_13 },
-  { clause: '(c)', otherwise: F4_14 },
-])
-const F4_15 = F4.formula('F4-15', {
-  gives: ['M_n', 'moment'],
-  where: { R_pt: 'ratio', M_yt: 'moment' },
-  text: 'R_pt*M_yt',
-})
 /** M_n as the least over its limit states, given buckling at C_b = 1 and everything else in M_cap. */
 const LEAST = F1.formula('F1(b)', {
   gives: ['M_n', 'moment'],

@@ -2,10 +2,11 @@
 import type { Entry, Family, Field } from '../../core/job/field.ts'
 import { fieldList } from '../../core/job/fields.ts'
 import { inWords } from '../../core/job/phrases.ts'
-import type { UnitSystem } from '../../core/quantity/kinds.ts'
+import type { Json } from '../../core/job/json.ts'
+import { as, type UnitSystem } from '../../core/quantity/kinds.ts'
 import { readQuantity } from '../../core/quantity/read.ts'
 import { shownUnit } from '../../core/quantity/units.ts'
-import { writeUnit } from '../../core/quantity/write.ts'
+import { writeQuantity, writeUnit } from '../../core/quantity/write.ts'
 import { lineOf } from '../state/typed.ts'
 import type { JobState } from '../state/types.ts'
 import { WAYS, type Way } from '../state/ways.ts'
@@ -50,21 +51,27 @@ export const formOf = (job: Pick<JobState, 'way' | 'entry' | 'has' | 'cranes'>):
 /** The id of a line's entry in the page. */
 export const entryId = (path: string): string => `entry-${path.replace(/\W+/g, '-')}`
 
-/** What a line says where nothing is entered. A default of nothing is shown in the units in use. */
+/** What a line says where nothing is entered: the default, in the units in use. */
 export const defaultText = ({ field, path }: Pick<FormLine, 'field' | 'path'>, units: UnitSystem): string => {
   const crane = /^cranes\[(\d+)\]\.name$/.exec(path)?.[1]
   if (crane !== undefined) return `Crane ${Number(crane) + 1}`
   const taken = field.default
   if (taken === undefined) return ''
   if (taken.text !== undefined) return taken.text
-  const text = lineOf(taken.entry) ?? ''
   const { entry } = field
   if (entry.is === 'flag') return taken.entry === true ? 'yes' : 'no'
-  if (entry.is === 'choice') return wordOf(text)
-  if (entry.is !== 'quantity') return text
-  const read = readQuantity(text, entry.kind)
+  if (entry.is === 'choice') return wordOf(lineOf(taken.entry) ?? '')
+  return lineOf(inUnits(taken.entry, entry, units)) ?? ''
+}
+
+/** A default's quantities in the units in use; what is no quantity as it stands. */
+const inUnits = (json: Json | undefined, entry: Entry, units: UnitSystem): Json | undefined => {
+  if (entry.is === 'list' && Array.isArray(json))
+    return (json as readonly Json[]).map((item) => inUnits(item, entry.of, units)!)
+  if (entry.is !== 'quantity' || typeof json !== 'string') return json
+  const read = readQuantity(json, entry.kind)
   const kind = entry.kind === 'forceOrMass' ? 'force' : entry.kind
-  return read.ok && read.value === 0 ? `0 ${writeUnit(shownUnit(kind, units))}` : text
+  return read.ok ? writeQuantity({ kind, value: as(kind, read.value) }, units) : json
 }
 
 /** What may be entered and what holds if nothing is, as the lines of a note. */

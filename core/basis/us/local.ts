@@ -1,6 +1,7 @@
 /** Shear of the span and the web under wheels and over bearings. */
 import { unrecorded, type WorkingRecorder } from '../../formula/working.ts'
 import { as, type Metre, type Newton } from '../../quantity/kinds.ts'
+import { spanOf } from '../../travel/influence.ts'
 import type { Ask, Subject, Verdict } from '../types.ts'
 import type { Design, Loading } from './design.ts'
 import { ask, demandOf, judge } from './judgement.ts'
@@ -108,8 +109,7 @@ export function webPlan(design: Design, span: number): { asks: readonly Ask[]; v
 
 function wheelAsks(design: Design, span: number, loading: Loading, state: LimitState): readonly Ask[] {
   const { section, job } = design
-  const length = job.runway.spans[span]!
-  const start = job.runway.spans.slice(0, span).reduce((sum, each) => sum + each, 0)
+  const { start, length } = spanOf(job.runway, span)
   const zone = state.endZone * section.d
   const { rail } = job.runway
   const dispersal = { h_r: as('length', rail.height - rail.wear), t_cap: section.cap.thickness }

@@ -2,6 +2,7 @@
 import { chapter } from '../../formula/chapter.ts'
 import type { WorkingRecorder } from '../../formula/working.ts'
 import { as, type Metre, type Newton, type NewtonMetre } from '../../quantity/kinds.ts'
+import { spanOf } from '../../travel/influence.ts'
 import type { Extreme, MomentTerm } from '../../travel/types.ts'
 import type { Design } from './design.ts'
 
@@ -37,9 +38,8 @@ export function momentByStatics(
   station: Metre,
   on: WorkingRecorder,
 ): NewtonMetre {
-  const { spans } = design.job.runway
-  const L = spans[place.span]!
-  const start = spans.slice(0, place.span).reduce((sum, length) => sum + length, 0)
+  const { start, length } = spanOf(design.job.runway, place.span)
+  const L = as('distance', length)
   const x = as('distance', station - start)
   let [aboutRight, aboutSection] = [0, 0]
   for (const { wheel, at, name } of standingOn(design, place)) {
@@ -66,9 +66,8 @@ export function reactionByStatics(
   end: 'left' | 'right',
   on: WorkingRecorder,
 ): Newton {
-  const { spans } = design.job.runway
-  const L = spans[place.span]!
-  const start = spans.slice(0, place.span).reduce((sum, length) => sum + length, 0)
+  const { start, length } = spanOf(design.job.runway, place.span)
+  const L = as('distance', length)
   let aboutOther = 0
   for (const { wheel, at, name } of standingOn(design, place)) {
     const x = at - start

@@ -3,6 +3,7 @@ import { chapter } from '../../formula/chapter.ts'
 import { unrecorded, type WorkingRecorder } from '../../formula/working.ts'
 import { as, type Metre, type NewtonMetre } from '../../quantity/kinds.ts'
 import { writeQuantity } from '../../quantity/write.ts'
+import { spanOf } from '../../travel/influence.ts'
 import type { Extreme, MomentTerm } from '../../travel/types.ts'
 import type { Ask, Subject } from '../types.ts'
 import type { Design, Loading } from './design.ts'
@@ -66,7 +67,7 @@ export function strongTerms(
   const { design, span, length, strength } = axis
   const available = (M_n: NewtonMetre): NewtonMetre => availableFlexure(unrecorded, design.job.basis.method, M_n)
   if (!usesDiagram(axis)) return [[greatest(loading, available(strength.M_n), 1, ends)]]
-  const start = design.job.runway.spans.slice(0, span).reduce((sum, each) => sum + each, 0)
+  const { start } = spanOf(design.job.runway, span)
   const buckling = available(strength.buckling!)
   const weighed = (weight: number): MomentTerm => greatest(loading, buckling, (weight / 12.5) * reduction(axis), ends)
   const quarter = (part: number, weight: number): MomentTerm => ({
